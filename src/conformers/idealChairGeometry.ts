@@ -1,0 +1,72 @@
+import type { Molecule } from "../structure/Molecule.ts";
+import { axialFace, type Chair } from "./Chair.ts";
+
+/**
+ * Cyclohexane as measured by electron diffraction (C–C 1.536 Å, C–C–C 111.4°, from memory) has its atoms on a
+ * circle of this radius, alternately above and below the mean plane by this height; both in Å.
+ */
+const RADIUS = 1.4652;
+const HEIGHT = 0.2305;
+
+/** Direction of an equatorial bond: outwards and, by the tetrahedral angle, to the side away from the axial bond. */
+const EQUATORIAL_OUT = Math.sqrt(8) / 3;
+const EQUATORIAL_DOWN = 1 / 3;
+
+/** Covalent radii in Å for single bonds (rounded from Cordero et al., Dalton Trans. 2008, 2832; from memory). */
+const RADII: Readonly<Record<string, number>> = {
+  H: 0.31, D: 0.31, C: 0.76, N: 0.71, O: 0.66, F: 0.57, Si: 1.11, P: 1.07, S: 1.05, Cl: 1.02,
+  Ge: 1.2, As: 1.19, Se: 1.2, Br: 1.2, Sn: 1.39, Te: 1.38, I: 1.39, Hg: 1.32, Pb: 1.46, Mg: 1.41,
+};
+
+export interface PlacedAtom {
+  readonly element: string;
+  readonly atom: number | null;
+  readonly parent: number | null;
+  readonly x: number;
+  readonly y: number;
+  readonly z: number;
+}
+
+/**
+ * Coordinates (Å) of a chair: ring atoms, their hydrogens, and the first atom of each group.
+ *
+ * Every ring has the shape of the cyclohexane chair, z along its threefold axis and the up face towards +z, so
+ * that axial bonds are exactly vertical and each equatorial bond is parallel to the ring bonds one removed. Bond
+ * lengths to groups are sums of covalent radii. It is an idealised geometry for drawing, not a relaxed one.
+ */
+export function idealChairGeometry(molecule: Molecule, chair: Chair): readonly PlacedAtom[] {
+  return chair.ring.atoms.flatMap((index, position) => {
+    const atom = molecule.atoms[index]!;
+    // The list runs clockwise seen from +z.
+    const angle = (-Math.PI / 3) * position;
+    const out = [Math.cos(angle), Math.sin(angle)] as const;
+    const up = axialFace(chair, index) === "up" ? 1 : -1;
+    const centre = { x: RADIUS * out[0], y: RADIUS * out[1], z: up * HEIGHT };
+    const ringAtom: PlacedAtom = { element: atom.element, atom: index, parent: null, ...rounded(centre) };
+    const place = (element: string, exocyclic: number | null, axial: boolean): PlacedAtom => {
+      const length = (RADII[atom.element] ?? 1) + (RADII[element] ?? 1);
+      const outward = axial ? 0 : EQUATORIAL_OUT;
+      const upward = axial ? up : -up * EQUATORIAL_DOWN;
+      const point = {
+        x: centre.x + length * outward * out[0],
+        y: centre.y + length * outward * out[1],
+        z: centre.z + length * upward,
+      };
+      return { element, atom: exocyclic, parent: index, ...rounded(point) };
+    };
+    const here = chair.ring.substituents.filter((substituent) => substituent.ringAtom === index);
+    const groups = here.map((substituent) => {
+      const axial = (chair.faces.get(substituent.atom) === "up" ? 1 : -1) === up;
+      return { placed: place(molecule.atoms[substituent.atom]!.element, substituent.atom, axial), axial };
+    });
+    // Hydrogens take the places that are left, equatorial first: a lone pair is then the axial one.
+    const free = [false, true].filter((axial) => !groups.some((group) => group.axial === axial));
+    const hydrogens = free.slice(0, atom.hydrogens).map((axial) => place("H", null, axial));
+    return [ringAtom, ...groups.map((group) => group.placed), ...hydrogens];
+  });
+}
+
+function rounded(point: { x: number; y: number; z: number }): { x: number; y: number; z: number } {
+  const round = (value: number) => Math.round(value * 1e4) / 1e4 + 0;
+  return { x: round(point.x), y: round(point.y), z: round(point.z) };
+}

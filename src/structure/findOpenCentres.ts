@@ -1,0 +1,101 @@
+import { bondBetween, mirrorImage, type Molecule, type TetrahedralSense, withSenses } from "./Molecule.ts";
+import type { Toolkit } from "./Toolkit.ts";
+
+/** Most open centres whose combinations are tried. */
+const MAXIMUM_OPEN = 8;
+
+/** One way of filling in every configuration that the structure leaves open. */
+export interface Member {
+  readonly molecule: Molecule;
+  readonly canonicalSmiles: string;
+  readonly mirrorSmiles: string;
+}
+
+export interface OpenStereo {
+  /** Atoms that need a configuration and have none. */
+  readonly centres: readonly number[];
+  /** Distinct stereoisomers that the structure as written may stand for, by canonical SMILES; one when nothing is open. */
+  readonly members: readonly Member[];
+  /** False when there are too many open centres to try every combination; `centres` then lists all candidates. */
+  readonly complete: boolean;
+}
+
+/**
+ * Finds missing tetrahedral configurations, including the 1,3 and 1,4 patterns of rings that are no centres
+ * by themselves: every combination of senses is tried and the canonical forms are compared. An atom needs a
+ * configuration when, in some combination, reversing it alone gives another substance.
+ */
+export function findOpenCentres(molecule: Molecule, toolkit: Toolkit): OpenStereo {
+  const candidates = molecule.atoms.filter((atom) => isCandidate(molecule, atom.index)).map((atom) => atom.index);
+  const member = (filled: Molecule): Member => ({
+    molecule: filled,
+    canonicalSmiles: toolkit.canonicalSmiles(filled),
+    mirrorSmiles: toolkit.canonicalSmiles(mirrorImage(filled)),
+  });
+  if (candidates.length === 0) return { centres: [], members: [member(molecule)], complete: true };
+  if (candidates.length > MAXIMUM_OPEN) return { centres: candidates, members: [member(molecule)], complete: false };
+
+  const combinations = 2 ** candidates.length;
+  const filled: Molecule[] = [];
+  const forms: string[] = [];
+  for (let code = 0; code < combinations; code++) {
+    const senses = new Map<number, TetrahedralSense>(
+      candidates.map((atom, bit) => [atom, (code >> bit) & 1 ? "cw" : "ccw"]),
+    );
+    const next = withSenses(molecule, senses);
+    filled.push(next);
+    forms.push(toolkit.canonicalSmiles(next));
+  }
+  const centres = candidates.filter((_, bit) => forms.some((form, code) => form !== forms[code ^ (1 << bit)]));
+  const distinct = new Map<string, Molecule>();
+  forms.forEach((form, code) => {
+    if (!distinct.has(form)) distinct.set(form, filled[code]!);
+  });
+  const members = [...distinct.keys()].sort().map((form) => member(distinct.get(form)!));
+  return { centres, members, complete: true };
+}
+
+/** True for an atom without a sense that could hold one: four different-looking places, or a stable pyramid. */
+function isCandidate(molecule: Molecule, index: number): boolean {
+  const atom = molecule.atoms[index]!;
+  if (atom.stereo !== null || atom.aromatic || atom.radicals > 0) return false;
+  const places = atom.neighbours.length + atom.hydrogens;
+  const orders = atom.neighbours.map((neighbour) => bondBetween(molecule, index, neighbour)!.order);
+  const single = orders.every((order) => order === 1);
+  switch (atom.element) {
+    case "C":
+    case "Si":
+    case "Ge":
+    case "Sn":
+      if (!single || places !== 4 || atom.hydrogens > 1) return false;
+      break;
+    case "N":
+      if (!single || places !== 4 || atom.hydrogens > 0) return false;
+      break;
+    case "P":
+    case "As":
+      if (!((places === 3 && single && atom.charge === 0) || places === 4) || atom.hydrogens > 0) return false;
+      break;
+    case "S":
+    case "Se":
+      if (places !== 3 || atom.hydrogens > 0) return false;
+      break;
+    default:
+      return false;
+  }
+  return !hasEqualTerminalNeighbours(molecule, index);
+}
+
+/** Two equal one-atom neighbours (two methyls, two oxygens of a sulfone) settle the matter without a trial. */
+function hasEqualTerminalNeighbours(molecule: Molecule, index: number): boolean {
+  const seen = new Set<string>();
+  for (const neighbour of molecule.atoms[index]!.neighbours) {
+    const atom = molecule.atoms[neighbour]!;
+    if (atom.neighbours.length !== 1) continue;
+    const order = bondBetween(molecule, index, neighbour)!.order;
+    const key = `${atom.element}:${atom.isotope}:${atom.charge}:${atom.hydrogens}:${order}`;
+    if (seen.has(key)) return true;
+    seen.add(key);
+  }
+  return false;
+}
