@@ -29,6 +29,12 @@ export interface AnalysedRing {
   readonly locants: readonly number[];
   readonly parent: string;
   readonly ringKey: string;
+  /** Element symbols of `atoms`. */
+  readonly elements: readonly string[];
+  /** Ring carbons. */
+  readonly carbons: readonly number[];
+  /** Ring atoms that invert and so let their group change face. */
+  readonly inverting: readonly number[];
   /** In the order of `atoms`. */
   readonly sites: readonly RingSite[];
   readonly substituents: readonly Substituent[];

@@ -40,13 +40,17 @@ export function analyseRings(
     const atoms = numbering.map((_, step) => numbering[(start + step) % 6]!);
     const locants = atoms.map((atom) => numbering.indexOf(atom) + 1);
     const place = (s: { ringAtom: number; atom: number }) => [numbering.indexOf(s.ringAtom), s.atom];
+    const sites = ringFaces(molecule, atoms);
     return {
       index,
       atoms,
+      elements: atoms.map((atom) => molecule.atoms[atom]!.element),
+      carbons: atoms.filter((atom) => molecule.atoms[atom]!.element === "C"),
+      inverting: sites.filter((site) => site.faces === "free").map((site) => site.ringAtom),
       locants,
       parent,
       ringKey: ringKey(molecule, parent, numbering),
-      sites: ringFaces(molecule, atoms),
+      sites,
       substituents: [...substituents].sort((a, b) => compareLists(place(a), place(b))),
     };
   });

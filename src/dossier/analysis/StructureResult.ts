@@ -1,0 +1,27 @@
+import type { Alert, Identity, Structure } from "../Dossier.ts";
+import type { Member } from "../../structure/findOpenCentres.ts";
+import type { Molecule } from "../../structure/Molecule.ts";
+import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
+
+/** A refusal: the line is wrong (`invalid-…`) or understood and not analysed (`unsupported-…`). */
+export interface Refusal {
+  readonly code: string;
+  readonly message: string;
+  /** 0-based character of the SMILES, where known. */
+  readonly position: number | null;
+}
+
+/** What can be said of a structure before any energy. */
+export interface StructureResult {
+  readonly identity: Identity;
+  readonly structure: Structure;
+  readonly written: Molecule;
+  /** Saturated six-membered rings that stand alone; empty when `refusal` says why. */
+  readonly rings: readonly AnalysedRing[];
+  readonly refusal: Refusal | null;
+  /** The molecule whose conformers are listed; null when open stereochemistry forbids it. */
+  readonly molecule: Molecule | null;
+  /** Stereoisomers that the structure as written may stand for. */
+  readonly members: readonly Member[];
+  readonly alerts: readonly Alert[];
+}
