@@ -208,8 +208,16 @@ export interface Contribution {
   /** One line for a reader: citation keys, or why a stand-in was used. */
   readonly source: string;
   readonly sourceKeys: readonly string[];
-  /** Register rows and class stand-ins used, with the factor of each in this value. */
-  readonly terms: readonly { readonly row: string; readonly coefficient: number }[];
+  /**
+   * Register rows and stand-ins used, with the factor of each in this value and what it is worth by itself
+   * at the dossier's temperature (kJ/mol, standard uncertainty).
+   */
+  readonly terms: readonly {
+    readonly row: string;
+    readonly coefficient: number;
+    readonly value_kJ_mol: number;
+    readonly u_kJ_mol: number;
+  }[];
   /** Medium and temperature the printed value is for. */
   readonly medium: string;
   readonly temperature_K: number | null;
