@@ -1,0 +1,40 @@
+import type { Dossier } from "../../dossier/Dossier.ts";
+import type { DerivationStep } from "../DerivationStep.ts";
+import { texAligned } from "../texAligned.ts";
+import { KILOJOULE_PER_MOLE, texConformer, texEnergy } from "../texNumbers.ts";
+import { shownEquilibria } from "./shownConformers.ts";
+import { texDifference } from "./texDifference.ts";
+
+/** Difference between the sums and the record that rounding explains, kJ/mol. */
+const TOLERANCE = 1e-6;
+
+/** ΔG° of each conformer against the most stable one, with the numbers. */
+export function freeEnergyDifferences(dossier: Dossier): DerivationStep {
+  const pairs = shownEquilibria(dossier);
+  const lines = pairs.flatMap(({ equilibrium, from, to }) => {
+    const name = texDifference(dossier, to.id);
+    if (equilibrium.bySymmetry) return [`${name} &= 0 \\quad\\text{exactly}`];
+    const subtracted = from.sum_kJ_mol < 0 ? `(${texEnergy(from.sum_kJ_mol)})` : texEnergy(from.sum_kJ_mol);
+    return [
+      `${name} &= G^\\circ(${texConformer(to.id)}) - G^\\circ(${texConformer(from.id)})`,
+      `&= ${texEnergy(to.sum_kJ_mol)} - ${subtracted}`,
+      `&= ${texEnergy(equilibrium.deltaG_kJ_mol)}${KILOJOULE_PER_MOLE}`,
+    ];
+  });
+  const unexplained = pairs.some(
+    ({ equilibrium, from, to }) =>
+      Math.abs(to.sum_kJ_mol - from.sum_kJ_mol - equilibrium.deltaG_kJ_mol) > TOLERANCE,
+  );
+  const first = dossier.conformers[0]?.id ?? "A";
+  return {
+    id: "difference",
+    title: "Free-energy difference",
+    words:
+      `The difference is taken as the other conformer minus ${first}, the most stable; it is positive when ${first} is preferred.` +
+      (unexplained
+        ? " The record’s difference is not the difference of the sums above and must be checked."
+        : ""),
+    tex: texAligned(lines),
+    where: [],
+  };
+}
