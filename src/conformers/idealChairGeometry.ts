@@ -14,8 +14,26 @@ const EQUATORIAL_DOWN = 1 / 3;
 
 /** Covalent radii in Å for single bonds (rounded from Cordero et al., Dalton Trans. 2008, 2832; from memory). */
 const RADII: Readonly<Record<string, number>> = {
-  H: 0.31, D: 0.31, C: 0.76, N: 0.71, O: 0.66, F: 0.57, Si: 1.11, P: 1.07, S: 1.05, Cl: 1.02,
-  Ge: 1.2, As: 1.19, Se: 1.2, Br: 1.2, Sn: 1.39, Te: 1.38, I: 1.39, Hg: 1.32, Pb: 1.46, Mg: 1.41,
+  H: 0.31,
+  D: 0.31,
+  C: 0.76,
+  N: 0.71,
+  O: 0.66,
+  F: 0.57,
+  Si: 1.11,
+  P: 1.07,
+  S: 1.05,
+  Cl: 1.02,
+  Ge: 1.2,
+  As: 1.19,
+  Se: 1.2,
+  Br: 1.2,
+  Sn: 1.39,
+  Te: 1.38,
+  I: 1.39,
+  Hg: 1.32,
+  Pb: 1.46,
+  Mg: 1.41,
 };
 
 export interface PlacedAtom {

@@ -2,7 +2,10 @@ import type { EnergyTerm } from "./EnergyTerm.ts";
 import type { Parameter } from "./Parameter.ts";
 
 /** A conformer's energy as a sum of independent parameters: factor of each by parameter id. */
-export type LinearEnergy = ReadonlyMap<string, { readonly parameter: Parameter; readonly coefficient: number }>;
+export type LinearEnergy = ReadonlyMap<
+  string,
+  { readonly parameter: Parameter; readonly coefficient: number }
+>;
 
 /** Collects the factor of every parameter over all terms of a conformer. */
 export function linearEnergy(terms: readonly EnergyTerm[]): LinearEnergy {

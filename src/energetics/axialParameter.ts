@@ -25,16 +25,23 @@ export interface AxialParameter {
  * of the same position for another group of the same class, the cyclohexane value of the group times the ratio
  * found there for methyl (carbon groups), or the cyclohexane value itself (others), each widened.
  */
-export function axialParameter(context: EnergyContext, ring: AnalysedRing, substituent: Substituent): AxialParameter {
+export function axialParameter(
+  context: EnergyContext,
+  ring: AnalysedRing,
+  substituent: Substituent,
+): AxialParameter {
   const locant = ring.locants[ring.atoms.indexOf(substituent.ringAtom)]!;
   const where = `${ring.ringKey}, position ${locant}`;
-  const lookup = (ringKey: string, group: string) => axialRow(context.register, { ...context, ring: ringKey, locant, group });
+  const lookup = (ringKey: string, group: string) =>
+    axialRow(context.register, { ...context, ring: ringKey, locant, group });
 
   const key = substituent.group?.key;
   const own = key === undefined ? undefined : lookup(ring.ringKey, key);
-  if (own !== undefined) return { kind: own.row.kind === "anomeric" ? "anomeric" : "axial group", parameter: rowParameter(own) };
+  if (own !== undefined)
+    return { kind: own.row.kind === "anomeric" ? "anomeric" : "axial group", parameter: rowParameter(own) };
 
-  if (ring.parent === "cyclohexane") return { kind: "axial group", parameter: classStandIn(context, substituent) };
+  if (ring.parent === "cyclohexane")
+    return { kind: "axial group", parameter: classStandIn(context, substituent) };
 
   const name = nameOf(substituent);
   for (const similar of similarGroups(context.register, substituent)) {
@@ -43,7 +50,12 @@ export function axialParameter(context: EnergyContext, ring: AnalysedRing, subst
     const why = `No value for ${name} (${where}); that of ${similar}, a group of the same class, stands in.`;
     return {
       kind: match.row.kind === "anomeric" ? "anomeric" : "axial group",
-      parameter: borrowed(rowParameter(match), `stand-in/axial/${ring.ringKey}/${locant}/${name}`, LOAN.sameClass, why),
+      parameter: borrowed(
+        rowParameter(match),
+        `stand-in/axial/${ring.ringKey}/${locant}/${name}`,
+        LOAN.sameClass,
+        why,
+      ),
     };
   }
   return { kind: "axial group", parameter: heteroringStandIn(context, ring, substituent, locant, where) };
@@ -51,7 +63,8 @@ export function axialParameter(context: EnergyContext, ring: AnalysedRing, subst
 
 /** G(axial) − G(equatorial) of the group in cyclohexane: what each of its two syn-axial hydrogens is charged from. */
 export function cyclohexaneParameter(context: EnergyContext, substituent: Substituent): Parameter {
-  const lookup = (group: string) => axialRow(context.register, { ...context, ring: "cyclohexane", locant: 1, group });
+  const lookup = (group: string) =>
+    axialRow(context.register, { ...context, ring: "cyclohexane", locant: 1, group });
   const own = substituent.group === null ? undefined : lookup(substituent.group.key);
   if (own !== undefined) return rowParameter(own);
   return classStandIn(context, substituent);
@@ -92,7 +105,12 @@ function heteroringStandIn(
   const besideHeteroatom = polar && isBesideHeteroatom(ring, substituent);
   const extra = besideHeteroatom ? LOAN.nextToHeteroatom : LOAN.otherRing;
   const anomeric = besideHeteroatom ? " An anomeric effect is likely and may reverse the sign." : "";
-  return borrowed(base, id, extra, `No value for ${name} (${where}); its cyclohexane value stands in.${anomeric}`);
+  return borrowed(
+    base,
+    id,
+    extra,
+    `No value for ${name} (${where}); its cyclohexane value stands in.${anomeric}`,
+  );
 }
 
 function isBesideHeteroatom(ring: AnalysedRing, substituent: Substituent): boolean {

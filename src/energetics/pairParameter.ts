@@ -37,7 +37,9 @@ export function pairParameter(
   const seconds = [...(second === undefined ? [] : [second]), ...similarGroups(context.register, pair[1])];
   // Loans that change one group only come before loans that change both.
   const candidates = firsts
-    .flatMap((a, i) => seconds.map((b, j) => ({ a, b, changed: Number(a !== first) + Number(b !== second), order: i + j })))
+    .flatMap((a, i) =>
+      seconds.map((b, j) => ({ a, b, changed: Number(a !== first) + Number(b !== second), order: i + j })),
+    )
     .sort((x, y) => x.changed - y.changed || x.order - y.order);
   for (const { a, b, changed } of candidates) {
     const match = lookup(a, b);

@@ -26,7 +26,14 @@ export function populations(energies: readonly LinearEnergy[], temperature: Kelv
   const RT = GAS_CONSTANT * temperature;
   // Energies relative to the first keep parameters common to all from spoiling the last digits.
   const relative = energies.map(
-    (energy) => combine([{ energy, weight: 1 }, { energy: energies[0]!, weight: -1 }], temperature).value,
+    (energy) =>
+      combine(
+        [
+          { energy, weight: 1 },
+          { energy: energies[0]!, weight: -1 },
+        ],
+        temperature,
+      ).value,
   );
   return energies.map((energy, i) => {
     const others = relative.flatMap((g, k) => (k === i ? [] : [{ k, x: -g / RT }]));
@@ -42,7 +49,10 @@ export function populations(energies: readonly LinearEnergy[], temperature: Kelv
       temperature,
     );
     const half = (NORMAL_95 * u) / RT;
-    return { population: logistic(logit), population95: [logistic(logit - half), logistic(logit + half)] as const };
+    return {
+      population: logistic(logit),
+      population95: [logistic(logit - half), logistic(logit + half)] as const,
+    };
   });
 }
 

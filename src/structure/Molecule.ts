@@ -42,11 +42,16 @@ export interface Bond {
 
 /** The bond between two atoms, or undefined. */
 export function bondBetween(molecule: Molecule, a: number, b: number): Bond | undefined {
-  return molecule.bonds.find((bond) => (bond.from === a && bond.to === b) || (bond.from === b && bond.to === a));
+  return molecule.bonds.find(
+    (bond) => (bond.from === a && bond.to === b) || (bond.from === b && bond.to === a),
+  );
 }
 
 /** The same molecule with some tetrahedral senses replaced. */
-export function withSenses(molecule: Molecule, senses: ReadonlyMap<number, TetrahedralSense | null>): Molecule {
+export function withSenses(
+  molecule: Molecule,
+  senses: ReadonlyMap<number, TetrahedralSense | null>,
+): Molecule {
   return {
     ...molecule,
     atoms: molecule.atoms.map((atom) => {

@@ -20,7 +20,11 @@ export interface Toolkit {
 
 export type ReadResult =
   | { readonly ok: true; readonly molecule: Molecule; readonly formula: string; readonly molarMass: number }
-  | { readonly ok: false; readonly reason: string; /** 0-based character in the string, where known. */ readonly position: number | null };
+  | {
+      readonly ok: false;
+      readonly reason: string /** 0-based character in the string, where known. */;
+      readonly position: number | null;
+    };
 
 export interface Descriptors {
   readonly atoms: ReadonlyMap<number, string>;
@@ -29,5 +33,9 @@ export interface Descriptors {
 
 export interface Depiction {
   readonly coordinates: readonly { readonly x: number; readonly y: number }[];
-  readonly wedges: readonly { readonly from: number; readonly to: number; readonly wedge: "solid" | "hashed" }[];
+  readonly wedges: readonly {
+    readonly from: number;
+    readonly to: number;
+    readonly wedge: "solid" | "hashed";
+  }[];
 }

@@ -23,9 +23,9 @@ export function analyseRings(
   const descriptors = services.toolkit.descriptors(molecule).atoms;
   return rings.map((ring, index) => {
     const substituents = ring.flatMap((ringAtom) =>
-      molecule.atoms[ringAtom]!.neighbours
-        .filter((neighbour) => !ring.includes(neighbour))
-        .map((first) => describeSubstituent(molecule, ringAtom, first, services.groups, services.toolkit)),
+      molecule.atoms[ringAtom]!.neighbours.filter((neighbour) => !ring.includes(neighbour)).map((first) =>
+        describeSubstituent(molecule, ringAtom, first, services.groups, services.toolkit),
+      ),
     );
     const { parent, numberings } = nameRing(molecule, ring, services.register);
     const byAuthor = authorNumbering?.every((atom) => ring.includes(atom)) === true;
@@ -33,7 +33,11 @@ export function analyseRings(
       ? authorNumbering
       : chooseNumbering(
           numberings,
-          substituents.map((s) => ({ ringAtom: s.ringAtom, prefix: s.prefix, seniority: seniorityOf(s.groupClass) })),
+          substituents.map((s) => ({
+            ringAtom: s.ringAtom,
+            prefix: s.prefix,
+            seniority: seniorityOf(s.groupClass),
+          })),
           descriptors,
         );
     const start = numbering.indexOf(Math.min(...numbering));

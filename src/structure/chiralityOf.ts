@@ -1,4 +1,4 @@
-import { mirrorImage, type Molecule } from "./Molecule.ts";
+import { type Molecule, mirrorImage } from "./Molecule.ts";
 import type { Toolkit } from "./Toolkit.ts";
 
 /**

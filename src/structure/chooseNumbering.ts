@@ -10,7 +10,16 @@ export interface NumberedGroup {
 }
 
 /** Classes of groups that a ring's name can end in, most senior first (IUPAC P-41, those that occur here). */
-const SENIORITY: readonly string[] = ["carboxylate", "ester", "carboxamide", "cyano", "acyl", "hydroxyl", "thiol", "amino"];
+const SENIORITY: readonly string[] = [
+  "carboxylate",
+  "ester",
+  "carboxamide",
+  "cyano",
+  "acyl",
+  "hydroxyl",
+  "thiol",
+  "amino",
+];
 
 /** Rank of a group class as the suffix of a ring's name, 1 the most senior, 0 for none. */
 export function seniorityOf(groupClass: string): number {
@@ -35,7 +44,9 @@ export function chooseNumbering(
   const score = (numbering: readonly number[]): readonly number[] => {
     const locant = (atom: number) => numbering.indexOf(atom) + 1;
     const sorted = (list: readonly number[]) => [...list].sort((a, b) => a - b);
-    const suffix = sorted(groups.filter((g) => senior > 0 && g.seniority === senior).map((g) => locant(g.ringAtom)));
+    const suffix = sorted(
+      groups.filter((g) => senior > 0 && g.seniority === senior).map((g) => locant(g.ringAtom)),
+    );
     const all = sorted(groups.map((group) => locant(group.ringAtom)));
     // Equal prefixes share their locants in rising order, so that their own order in the input is irrelevant.
     const prefixes = [...new Set(alphabetical.map((group) => group.prefix))].flatMap((prefix) =>

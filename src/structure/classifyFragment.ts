@@ -48,7 +48,8 @@ export function classifyFragment(fragment: Fragment): string {
 
 const doubleTo = (molecule: Molecule, atom: Atom, others: readonly Atom[], ...elements: string[]) =>
   others.filter(
-    (other) => elements.includes(other.element) && bondBetween(molecule, atom.index, other.index)!.order === 2,
+    (other) =>
+      elements.includes(other.element) && bondBetween(molecule, atom.index, other.index)!.order === 2,
   );
 
 function carbonClass(molecule: Molecule, first: Atom, others: readonly Atom[]): string {
@@ -76,7 +77,9 @@ function oxygenClass(molecule: Molecule, first: Atom, others: readonly Atom[]): 
   if (next.element === "Si") return "silyloxy";
   if (next.element === "S" || next.element === "P") return "sulfonyloxy";
   if (next.aromatic) return "aryloxy";
-  const far = next.neighbours.map((index) => molecule.atoms[index]!).filter((atom) => atom.index !== first.index);
+  const far = next.neighbours
+    .map((index) => molecule.atoms[index]!)
+    .filter((atom) => atom.index !== first.index);
   if (doubleTo(molecule, next, far, "O", "S", "N").length > 0) return "acyloxy";
   return "alkoxy";
 }
@@ -85,12 +88,20 @@ function nitrogenClass(molecule: Molecule, first: Atom, others: readonly Atom[])
   if (first.charge > 0) {
     return others.some((other) => other.element === "O") ? "nitro" : "ammonium";
   }
-  if (others.some((other) => other.element === "N" && bondBetween(molecule, first.index, other.index)!.order > 1)) {
+  if (
+    others.some(
+      (other) => other.element === "N" && bondBetween(molecule, first.index, other.index)!.order > 1,
+    )
+  ) {
     return "azido";
   }
   const acyl = others.some((other) => {
     const far = other.neighbours.map((index) => molecule.atoms[index]!);
-    return ["C", "S", "P"].includes(other.element) && !other.aromatic && doubleTo(molecule, other, far, "O", "S", "N").length > 0;
+    return (
+      ["C", "S", "P"].includes(other.element) &&
+      !other.aromatic &&
+      doubleTo(molecule, other, far, "O", "S", "N").length > 0
+    );
   });
   if (acyl) return "amido";
   if (others.length === 0) return "amino";

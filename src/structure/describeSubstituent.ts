@@ -1,9 +1,9 @@
-import type { Toolkit } from "./Toolkit.ts";
 import { classifyFragment } from "./classifyFragment.ts";
 import { extractFragment, type Fragment } from "./extractFragment.ts";
 import type { GroupIndex } from "./groupIndex.ts";
-import { mirrorImage, type Molecule } from "./Molecule.ts";
+import { type Molecule, mirrorImage } from "./Molecule.ts";
 import type { Substituent } from "./StructureAnalysis.ts";
+import type { Toolkit } from "./Toolkit.ts";
 
 /** Cuts out a group, matches it with the register, and gives it the labels a reader will see. */
 export function describeSubstituent(

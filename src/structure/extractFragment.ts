@@ -42,7 +42,10 @@ export function extractFragment(molecule: Molecule, ringAtom: number, first: num
           ? null
           : {
               ...bond.stereo,
-              references: [place.get(bond.stereo.references[0])!, place.get(bond.stereo.references[1])!] as const,
+              references: [
+                place.get(bond.stereo.references[0])!,
+                place.get(bond.stereo.references[1])!,
+              ] as const,
             },
     }));
   return {
@@ -55,9 +58,20 @@ export function extractFragment(molecule: Molecule, ringAtom: number, first: num
         const atom = molecule.atoms[index]!;
         if (index === ringAtom) {
           const bare = { element: "*", atomicNumber: 0, charge: 0, isotope: 0, hydrogens: 0, radicals: 0 };
-          return { ...atom, ...bare, index: position, aromatic: false, stereo: null, neighbours: [place.get(first)!] };
+          return {
+            ...atom,
+            ...bare,
+            index: position,
+            aromatic: false,
+            stereo: null,
+            neighbours: [place.get(first)!],
+          };
         }
-        return { ...atom, index: position, neighbours: atom.neighbours.map((neighbour) => place.get(neighbour)!) };
+        return {
+          ...atom,
+          index: position,
+          neighbours: atom.neighbours.map((neighbour) => place.get(neighbour)!),
+        };
       }),
     },
   };

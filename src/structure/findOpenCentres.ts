@@ -1,4 +1,4 @@
-import { bondBetween, mirrorImage, type Molecule, type TetrahedralSense, withSenses } from "./Molecule.ts";
+import { bondBetween, type Molecule, mirrorImage, type TetrahedralSense, withSenses } from "./Molecule.ts";
 import type { Toolkit } from "./Toolkit.ts";
 
 /** Most open centres whose combinations are tried. */
@@ -26,14 +26,17 @@ export interface OpenStereo {
  * configuration when, in some combination, reversing it alone gives another substance.
  */
 export function findOpenCentres(molecule: Molecule, toolkit: Toolkit): OpenStereo {
-  const candidates = molecule.atoms.filter((atom) => isCandidate(molecule, atom.index)).map((atom) => atom.index);
+  const candidates = molecule.atoms
+    .filter((atom) => isCandidate(molecule, atom.index))
+    .map((atom) => atom.index);
   const member = (filled: Molecule): Member => ({
     molecule: filled,
     canonicalSmiles: toolkit.canonicalSmiles(filled),
     mirrorSmiles: toolkit.canonicalSmiles(mirrorImage(filled)),
   });
   if (candidates.length === 0) return { centres: [], members: [member(molecule)], complete: true };
-  if (candidates.length > MAXIMUM_OPEN) return { centres: candidates, members: [member(molecule)], complete: false };
+  if (candidates.length > MAXIMUM_OPEN)
+    return { centres: candidates, members: [member(molecule)], complete: false };
 
   const combinations = 2 ** candidates.length;
   const filled: Molecule[] = [];
@@ -46,7 +49,9 @@ export function findOpenCentres(molecule: Molecule, toolkit: Toolkit): OpenStere
     filled.push(next);
     forms.push(toolkit.canonicalSmiles(next));
   }
-  const centres = candidates.filter((_, bit) => forms.some((form, code) => form !== forms[code ^ (1 << bit)]));
+  const centres = candidates.filter((_, bit) =>
+    forms.some((form, code) => form !== forms[code ^ (1 << bit)]),
+  );
   const distinct = new Map<string, Molecule>();
   forms.forEach((form, code) => {
     if (!distinct.has(form)) distinct.set(form, filled[code]!);
@@ -74,7 +79,8 @@ function isCandidate(molecule: Molecule, index: number): boolean {
       break;
     case "P":
     case "As":
-      if (!((places === 3 && single && atom.charge === 0) || places === 4) || atom.hydrogens > 0) return false;
+      if (!((places === 3 && single && atom.charge === 0) || places === 4) || atom.hydrogens > 0)
+        return false;
       break;
     case "S":
     case "Se":

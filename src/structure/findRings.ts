@@ -19,7 +19,11 @@ export interface RingRefusal {
 
 /** The saturated six-membered rings that stand alone, or why the molecule is not analysed. */
 export type RingSearch =
-  | { readonly ok: true; readonly rings: readonly (readonly number[])[]; readonly unanalysed: readonly RingRefusal[] }
+  | {
+      readonly ok: true;
+      readonly rings: readonly (readonly number[])[];
+      readonly unanalysed: readonly RingRefusal[];
+    }
   | { readonly ok: false; readonly refusal: RingRefusal };
 
 /**
@@ -68,11 +72,18 @@ export function findRings(molecule: Molecule): RingSearch {
   return { ok: false, refusal };
 }
 
-function unsaturation(molecule: Molecule, ring: readonly number[], atoms: readonly Atom[]): RingRefusal | null {
+function unsaturation(
+  molecule: Molecule,
+  ring: readonly number[],
+  atoms: readonly Atom[],
+): RingRefusal | null {
   const where = `The six-membered ring of atoms ${ring.join(", ")}`;
   for (const atom of atoms) {
     if (atom.aromatic) {
-      return { code: "unsupported-unsaturated-ring", message: `${where} shares an edge with an aromatic ring; not analysed yet.` };
+      return {
+        code: "unsupported-unsaturated-ring",
+        message: `${where} shares an edge with an aromatic ring; not analysed yet.`,
+      };
     }
     for (const neighbour of atom.neighbours) {
       const bond = bondBetween(molecule, atom.index, neighbour)!;
@@ -120,10 +131,19 @@ function sharing(molecule: Molecule, ring: readonly number[]): RingRefusal | nul
     const atoms = ring.join(", ");
     worst =
       common === 1
-        ? { code: "unsupported-spiro-ring", message: `The six-membered ring of atoms ${atoms} shares one atom with another ring (spiro); not analysed yet.` }
+        ? {
+            code: "unsupported-spiro-ring",
+            message: `The six-membered ring of atoms ${atoms} shares one atom with another ring (spiro); not analysed yet.`,
+          }
         : common === 2
-          ? { code: "unsupported-fused-ring", message: `The six-membered ring of atoms ${atoms} is fused to another ring; not analysed yet.` }
-          : { code: "unsupported-bridged-ring", message: `The six-membered ring of atoms ${atoms} is part of a bridged system; not analysed yet.` };
+          ? {
+              code: "unsupported-fused-ring",
+              message: `The six-membered ring of atoms ${atoms} is fused to another ring; not analysed yet.`,
+            }
+          : {
+              code: "unsupported-bridged-ring",
+              message: `The six-membered ring of atoms ${atoms} is part of a bridged system; not analysed yet.`,
+            };
   }
   return worst;
 }

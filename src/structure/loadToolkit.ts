@@ -86,14 +86,14 @@ async function start(): Promise<Toolkit> {
   };
 }
 
-function read(
-  library: MainModule,
-  log: Log,
-  smiles: string,
-): ReadResult {
+function read(library: MainModule, log: Log, smiles: string): ReadResult {
   if (smiles.trim() === "") return { ok: false, reason: "The SMILES is empty.", position: 0 };
   if (smiles.length > MAXIMUM_LENGTH) {
-    return { ok: false, reason: `The SMILES is longer than ${MAXIMUM_LENGTH} characters.`, position: MAXIMUM_LENGTH };
+    return {
+      ok: false,
+      reason: `The SMILES is longer than ${MAXIMUM_LENGTH} characters.`,
+      position: MAXIMUM_LENGTH,
+    };
   }
   // Anything else the library would take (mol blocks, JSON, a name after a space) is not a SMILES.
   const stray = /[^\x21-\x7e]|[{}"'`,;|<>_^~!?&]/.exec(smiles);
@@ -111,7 +111,11 @@ function read(
     }
     const wildcard = molecule.atoms.find((atom) => atom.atomicNumber === 0);
     if (wildcard !== undefined) {
-      return { ok: false, reason: "A whole molecule is needed; the SMILES has an open attachment point (*).", position: smiles.indexOf("*") };
+      return {
+        ok: false,
+        reason: "A whole molecule is needed; the SMILES has an open attachment point (*).",
+        position: smiles.indexOf("*"),
+      };
     }
     const values = JSON.parse(mol.get_descriptors()) as { amw: number };
     return { ok: true, molecule, formula: hillFormula(molecule), molarMass: values.amw };
@@ -126,18 +130,26 @@ function explain(log: string, smiles: string): { reason: string; position: numbe
   const position = at === null ? null : Math.min(smiles.length - 1, Number(at[1]) - 1);
   const valence = /valence for atom # (\d+) (\w+), (\d+)/.exec(log);
   if (valence !== null) {
-    return { reason: `${valence[2]} (atom ${valence[1]}, counted from 0) would have ${valence[3]} bonds, which is too many.`, position: null };
+    return {
+      reason: `${valence[2]} (atom ${valence[1]}, counted from 0) would have ${valence[3]} bonds, which is too many.`,
+      position: null,
+    };
   }
   if (/unclosed ring/.test(log)) return { reason: "A ring is opened and never closed.", position };
-  if (/extra close parentheses/.test(log)) return { reason: "A closing parenthesis has no opening one.", position };
-  if (/extra open parentheses/.test(log)) return { reason: "An opening parenthesis is never closed.", position };
-  if (/kekulize/i.test(log)) return { reason: "The aromatic atoms cannot be given alternating double bonds.", position };
+  if (/extra close parentheses/.test(log))
+    return { reason: "A closing parenthesis has no opening one.", position };
+  if (/extra open parentheses/.test(log))
+    return { reason: "An opening parenthesis is never closed.", position };
+  if (/kekulize/i.test(log))
+    return { reason: "The aromatic atoms cannot be given alternating double bonds.", position };
   if (/syntax error/.test(log)) return { reason: "This is not a valid SMILES.", position };
   return { reason: "This is not a valid SMILES.", position };
 }
 
 function fromJson(json: JsonMolecule): Molecule {
-  const extension = json.extensions?.find((entry) => entry.aromaticAtoms !== undefined || entry.atomRings !== undefined) ?? {};
+  const extension =
+    json.extensions?.find((entry) => entry.aromaticAtoms !== undefined || entry.atomRings !== undefined) ??
+    {};
   const aromaticAtoms = new Set(extension.aromaticAtoms ?? []);
   const aromaticBonds = new Set(extension.aromaticBonds ?? []);
   const neighbours: number[][] = json.atoms.map(() => []);
@@ -153,7 +165,8 @@ function fromJson(json: JsonMolecule): Molecule {
       to,
       order: order === 2 || order === 3 ? order : 1,
       aromatic: aromaticBonds.has(index),
-      stereo: sense !== null && bond.stereoAtoms !== undefined ? { sense, references: bond.stereoAtoms } : null,
+      stereo:
+        sense !== null && bond.stereoAtoms !== undefined ? { sense, references: bond.stereoAtoms } : null,
     };
   });
   const atoms: Atom[] = json.atoms.map((atom, index) => ({

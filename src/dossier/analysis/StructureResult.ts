@@ -1,7 +1,7 @@
-import type { Alert, Identity, Structure } from "../Dossier.ts";
 import type { Member } from "../../structure/findOpenCentres.ts";
 import type { Molecule } from "../../structure/Molecule.ts";
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
+import type { Alert, Identity, Structure } from "../Dossier.ts";
 
 /** A refusal: the line is wrong (`invalid-…`) or understood and not analysed (`unsupported-…`). */
 export interface Refusal {

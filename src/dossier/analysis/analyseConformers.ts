@@ -33,7 +33,11 @@ export interface ConformerResult {
   readonly equilibria: readonly Equilibrium[];
   readonly temperatures: readonly TemperatureRow[];
   /** Parameters that differ between conformers and so decide the result: id and basis. */
-  readonly deciding: readonly { readonly id: string; readonly basis: string; readonly standing: string | null }[];
+  readonly deciding: readonly {
+    readonly id: string;
+    readonly basis: string;
+    readonly standing: string | null;
+  }[];
   /** The chairs behind each conformer, in the same order. */
   readonly chairSets: readonly ChairSet[];
 }
@@ -68,8 +72,16 @@ export function analyseConformers(
   const T = kelvin(temperature);
   const base = candidates[0]!.energy;
   const relativeTo = (reference: LinearEnergy, energy: LinearEnergy) =>
-    combine([{ energy, weight: 1 }, { energy: reference, weight: -1 }], T);
-  const height = new Map(candidates.map((candidate) => [candidate, relativeTo(base, candidate.energy).value]));
+    combine(
+      [
+        { energy, weight: 1 },
+        { energy: reference, weight: -1 },
+      ],
+      T,
+    );
+  const height = new Map(
+    candidates.map((candidate) => [candidate, relativeTo(base, candidate.energy).value]),
+  );
   const ordered = [...candidates].sort(
     (a, b) => height.get(a)! - height.get(b)! || (a.label < b.label ? -1 : a.label > b.label ? 1 : 0),
   );
@@ -117,7 +129,10 @@ export function analyseConformers(
     }),
     temperatures: grid.map((t) => ({
       temperature_K: t,
-      populations: populations(energies, kelvin(t)).map((share, i) => ({ conformer: conformerId(i), ...share })),
+      populations: populations(energies, kelvin(t)).map((share, i) => ({
+        conformer: conformerId(i),
+        ...share,
+      })),
     })),
     deciding: decidingParameters(energies),
   };
@@ -138,7 +153,8 @@ function clean(value: number): number {
 function labelOf(chairs: ChairSet): string {
   const parts = chairs.flatMap((chair) => {
     const { ring } = chair;
-    const count = (group: Substituent) => ring.substituents.filter((s) => s.ringAtom === group.ringAtom).length;
+    const count = (group: Substituent) =>
+      ring.substituents.filter((s) => s.ringAtom === group.ringAtom).length;
     const entries = ring.substituents.map((group) => {
       const locant = ring.locants[ring.atoms.indexOf(group.ringAtom)]!;
       const letter = orientationOf(chair, group) === "axial" ? "a" : "e";
@@ -171,7 +187,8 @@ function contributionOf(term: EnergyTerm, temperature: number): Contribution {
   const keys = [...new Set(parameters.flatMap((parameter) => parameter.sources))].sort();
   const lead = term.parts[0]!.parameter;
   const standings = parameters.map((parameter) => parameter.standing);
-  const weakest = (["estimate", "memory", "confirmed"] as const).find((mark) => standings.includes(mark)) ?? null;
+  const weakest =
+    (["estimate", "memory", "confirmed"] as const).find((mark) => standings.includes(mark)) ?? null;
   const notes = [...new Set(parameters.map((parameter) => parameter.note).filter((note) => note !== null))];
   return {
     kind: term.kind,
@@ -211,7 +228,8 @@ function distinguish(molecule: Molecule, candidates: readonly Candidate[]): read
   for (const candidate of candidates) {
     const twin = done.find(
       (other) =>
-        sameCharge(other.energy, candidate.energy) && !equalBySymmetry(molecule, other.chairs, candidate.chairs),
+        sameCharge(other.energy, candidate.energy) &&
+        !equalBySymmetry(molecule, other.chairs, candidate.chairs),
     );
     if (twin === undefined) {
       done.push(candidate);

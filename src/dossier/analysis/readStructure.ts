@@ -14,7 +14,9 @@ export function readStructure(
   smiles: string,
   authorNumbering: readonly number[] | null,
   services: Services,
-): { readonly ok: true; readonly result: StructureResult } | { readonly ok: false; readonly refusal: Refusal } {
+):
+  | { readonly ok: true; readonly result: StructureResult }
+  | { readonly ok: false; readonly refusal: Refusal } {
   const { toolkit } = services;
   const read = toolkit.read(smiles);
   if (!read.ok) {
@@ -28,7 +30,8 @@ export function readStructure(
   const rings = search.ok ? analyseRings(shown, search.rings, authorNumbering, services) : [];
   const alerts = stereoAlerts(open, chosen !== null || !search.ok);
   if (search.ok) {
-    for (const { message } of search.unanalysed) alerts.push({ code: "ring-not-analysed", severity: "caution", message });
+    for (const { message } of search.unanalysed)
+      alerts.push({ code: "ring-not-analysed", severity: "caution", message });
   }
   const openBonds = findOpenDoubleBonds(written, toolkit);
   if (openBonds.length > 0) {
@@ -76,7 +79,9 @@ function chooseMember(
   if (second === undefined) return first!.molecule;
   if (more.length === 0 && first!.mirrorSmiles === second.canonicalSmiles) return first!.molecule;
   const inRing = new Set(rings.flat());
-  const outside = new Map(written.atoms.filter((atom) => !inRing.has(atom.index)).map((atom) => [atom.index, null]));
+  const outside = new Map(
+    written.atoms.filter((atom) => !inRing.has(atom.index)).map((atom) => [atom.index, null]),
+  );
   const ringsOnly = new Set<string>();
   for (const member of open.members) {
     const bare = withSenses(member.molecule, outside);
@@ -84,7 +89,9 @@ function chooseMember(
     const mirrored = services.toolkit.canonicalSmiles({
       ...bare,
       atoms: bare.atoms.map((atom) =>
-        atom.stereo === null ? atom : { ...atom, stereo: atom.stereo === "cw" ? ("ccw" as const) : ("cw" as const) },
+        atom.stereo === null
+          ? atom
+          : { ...atom, stereo: atom.stereo === "cw" ? ("ccw" as const) : ("cw" as const) },
       ),
     });
     ringsOnly.add(form < mirrored ? form : mirrored);
@@ -105,7 +112,8 @@ function stereoAlerts(open: OpenStereo, analysed: boolean): Alert[] {
       },
     ];
   }
-  const mirror = open.members.length === 2 && open.members[0]!.mirrorSmiles === open.members[1]!.canonicalSmiles;
+  const mirror =
+    open.members.length === 2 && open.members[0]!.mirrorSmiles === open.members[1]!.canonicalSmiles;
   const consequence = mirror
     ? "The two members are mirror images, with equal energies and populations; one of them is shown."
     : "The centres lie outside the analysed rings or do not change their conformers; one member is shown.";
@@ -152,7 +160,10 @@ function describeIdentity(
       ...labels.bonds.flatMap(({ atoms, descriptor }) =>
         descriptor === "E" || descriptor === "Z" ? [{ atoms, descriptor } as const] : [],
       ),
-      ...openBonds.map((atoms) => ({ atoms: [atoms[0], atoms[1]] as const, descriptor: "unspecified" as const })),
+      ...openBonds.map((atoms) => ({
+        atoms: [atoms[0], atoms[1]] as const,
+        descriptor: "unspecified" as const,
+      })),
     ].sort((a, b) => a.atoms[0] - b.atoms[0] || a.atoms[1] - b.atoms[1]),
     chirality: chiralityOf(shown, toolkit),
   };
@@ -174,7 +185,8 @@ function drawStructure(molecule: Molecule, services: Services): Structure {
     bonds: molecule.bonds.map((bond) => {
       const wedge = depiction.wedges.find(
         (entry) =>
-          (entry.from === bond.from && entry.to === bond.to) || (entry.from === bond.to && entry.to === bond.from),
+          (entry.from === bond.from && entry.to === bond.to) ||
+          (entry.from === bond.to && entry.to === bond.from),
       );
       return {
         from: wedge?.from ?? bond.from,

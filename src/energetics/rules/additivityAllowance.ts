@@ -15,13 +15,17 @@ const BESIDE = 0.2;
 export const additivityAllowance: EnergyRule = {
   id: "additivity-allowance",
   title: "Allowance for dipoles",
-  appliesTo: "two polar groups 1,4 and both axial, or 1,3 and both equatorial: no shift, but a doubt of its own",
+  appliesTo:
+    "two polar groups 1,4 and both axial, or 1,3 and both equatorial: no shift, but a doubt of its own",
   terms: (chair, context) => {
     const polar = (group: Parameters<typeof classOf>[1]) => classOf(context.register, group).polar;
     const both = (distance: 2 | 3, orientation: "axial" | "equatorial") =>
       pairsAtDistance(chair, distance).filter(
         ([a, b]) =>
-          polar(a) && polar(b) && orientationOf(chair, a) === orientation && orientationOf(chair, b) === orientation,
+          polar(a) &&
+          polar(b) &&
+          orientationOf(chair, a) === orientation &&
+          orientationOf(chair, b) === orientation,
       );
     const term = (
       pair: readonly [Parameters<typeof classOf>[1], Parameters<typeof classOf>[1]],

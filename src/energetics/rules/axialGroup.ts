@@ -11,7 +11,9 @@ export const axialGroup: EnergyRule = {
     "every axial group on an atom that keeps its configuration: gauche to the ring on both sides, the two 1,3-diaxial contacts with hydrogen",
   terms: (chair, context) =>
     chair.ring.substituents
-      .filter((group) => !chair.ring.inverting.includes(group.ringAtom) && orientationOf(chair, group) === "axial")
+      .filter(
+        (group) => !chair.ring.inverting.includes(group.ringAtom) && orientationOf(chair, group) === "axial",
+      )
       .map((group) => {
         const { kind, parameter } = axialParameter(context, chair.ring, group);
         return {

@@ -15,9 +15,14 @@ export function groupAt(chair: Chair, substituent: Substituent): string {
 }
 
 /** Pairs of groups on ring atoms `distance` bonds apart, each pair once, in ring order. */
-export function pairsAtDistance(chair: Chair, distance: 1 | 2 | 3): readonly (readonly [Substituent, Substituent])[] {
+export function pairsAtDistance(
+  chair: Chair,
+  distance: 1 | 2 | 3,
+): readonly (readonly [Substituent, Substituent])[] {
   const { atoms, substituents } = chair.ring;
   const on = (position: number) => substituents.filter((s) => s.ringAtom === atoms[position % 6]);
   const starts = distance === 3 ? [0, 1, 2] : [0, 1, 2, 3, 4, 5];
-  return starts.flatMap((start) => on(start).flatMap((a) => on(start + distance).map((b) => [a, b] as const)));
+  return starts.flatMap((start) =>
+    on(start).flatMap((a) => on(start + distance).map((b) => [a, b] as const)),
+  );
 }

@@ -10,7 +10,8 @@ import type { EnergyRule } from "./EnergyRule.ts";
 export const geminal: EnergyRule = {
   id: "geminal",
   title: "Two groups on one ring atom",
-  appliesTo: "two different groups on one ring atom: what their measured preference differs from that of the two single values",
+  appliesTo:
+    "two different groups on one ring atom: what their measured preference differs from that of the two single values",
   terms: (chair, context) =>
     chair.ring.atoms.flatMap((ringAtom) => {
       const here = chair.ring.substituents.filter((group) => group.ringAtom === ringAtom);
@@ -63,5 +64,7 @@ export const geminal: EnergyRule = {
 
 /** Groups with a flat face turn so as to make room, which single values do not show. */
 function isFlat(groupClass: string): boolean {
-  return ["aryl", "heteroaryl", "alkenyl", "acyl", "ester", "carboxamide", "carboxylate", "nitro"].includes(groupClass);
+  return ["aryl", "heteroaryl", "alkenyl", "acyl", "ester", "carboxamide", "carboxylate", "nitro"].includes(
+    groupClass,
+  );
 }

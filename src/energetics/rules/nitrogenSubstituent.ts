@@ -16,7 +16,9 @@ export const nitrogenSubstituent: EnergyRule = {
   appliesTo: "the axial group on a ring nitrogen that inverts; both places are separate conformers",
   terms: (chair, context) =>
     chair.ring.substituents
-      .filter((group) => chair.ring.inverting.includes(group.ringAtom) && orientationOf(chair, group) === "axial")
+      .filter(
+        (group) => chair.ring.inverting.includes(group.ringAtom) && orientationOf(chair, group) === "axial",
+      )
       .map((group) => {
         const { ring } = chair;
         const locant = ring.locants[ring.atoms.indexOf(group.ringAtom)]!;

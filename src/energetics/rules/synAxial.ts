@@ -10,7 +10,8 @@ import type { EnergyRule } from "./EnergyRule.ts";
 export const synAxial: EnergyRule = {
   id: "syn-axial",
   title: "Syn-axial pairs",
-  appliesTo: "two axial groups 1,3 to each other: the excess over the two contacts with hydrogen that their own values already hold",
+  appliesTo:
+    "two axial groups 1,3 to each other: the excess over the two contacts with hydrogen that their own values already hold",
   terms: (chair, context) =>
     pairsAtDistance(chair, 2)
       .filter(([a, b]) => orientationOf(chair, a) === "axial" && orientationOf(chair, b) === "axial")

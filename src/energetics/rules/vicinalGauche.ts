@@ -9,7 +9,8 @@ import type { EnergyRule } from "./EnergyRule.ts";
 export const vicinalGauche: EnergyRule = {
   id: "vicinal-gauche",
   title: "Gauche neighbours",
-  appliesTo: "two groups on neighbouring ring atoms, equatorial–equatorial or axial–equatorial; nothing for the anti, diaxial pair",
+  appliesTo:
+    "two groups on neighbouring ring atoms, equatorial–equatorial or axial–equatorial; nothing for the anti, diaxial pair",
   terms: (chair, context) =>
     pairsAtDistance(chair, 1)
       .filter(([a, b]) => !(orientationOf(chair, a) === "axial" && orientationOf(chair, b) === "axial"))

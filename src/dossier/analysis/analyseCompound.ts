@@ -1,0 +1,172 @@
+import type { EnergyContext } from "../../energetics/EnergyContext.ts";
+import type { MediumClass } from "../../register/Register.ts";
+import { analyseRings } from "../../structure/analyseRings.ts";
+import type {
+  Alert,
+  ChairRelation,
+  Conditions,
+  Conformer,
+  Equilibrium,
+  Identity,
+  MemberSummary,
+  Ring,
+  Structure,
+  TemperatureRow,
+} from "../Dossier.ts";
+import { analyseConformers, type ConformerResult } from "./analyseConformers.ts";
+import { conformerAlerts } from "./conformerAlerts.ts";
+import { configurationOf, describeRing } from "./describeRing.ts";
+import { readStructure } from "./readStructure.ts";
+import type { Services } from "./Services.ts";
+import type { Refusal, StructureResult } from "./StructureResult.ts";
+
+/** What one analysis is asked: a structure and the conditions it is wanted for. */
+export interface AnalysisRequest {
+  readonly smiles: string;
+  readonly ringLocants: readonly number[] | null;
+  /** K, above zero. */
+  readonly temperature_K: number;
+  /** Register key, or null when none is stated. */
+  readonly solvent: string | null;
+  readonly enumerateStereoisomers: boolean;
+}
+
+/** Everything computed for one compound: the heart of a Dossier, and of a line of the batch command. */
+export interface Analysis {
+  readonly conditions: Conditions;
+  readonly identity: Identity;
+  readonly structure: Structure;
+  readonly rings: readonly Ring[];
+  readonly conformers: readonly Conformer[];
+  readonly relation: ChairRelation | null;
+  readonly equilibria: readonly Equilibrium[];
+  readonly temperatures: readonly TemperatureRow[];
+  readonly members: readonly MemberSummary[];
+  readonly alerts: readonly Alert[];
+  /** Set when the structure is understood and its conformers are not analysed. */
+  readonly refusal: Refusal | null;
+}
+
+/** The medium assumed when none is stated: most single-group values were measured in such mixtures. */
+const DEFAULT_MEDIUM: MediumClass = "chlorinated";
+const DEFAULT_LABEL = "CDCl_3";
+
+/** The whole pipeline for one structure: pure, and the same for the site and the batch command. */
+export function analyseCompound(
+  request: AnalysisRequest,
+  services: Services,
+): { readonly ok: true; readonly analysis: Analysis } | { readonly ok: false; readonly refusal: Refusal } {
+  const conditions = conditionsOf(request, services);
+  const context: EnergyContext = {
+    register: services.register,
+    solvent: request.solvent,
+    medium: conditions.medium,
+  };
+  const read = readStructure(request.smiles, request.ringLocants, services);
+  if (!read.ok) return read;
+  const structure = read.result;
+  const rings = structure.rings.map(describeRing);
+  const alerts: Alert[] = [...structure.alerts];
+  if (!conditions.stated) {
+    alerts.push({
+      code: "solvent-unstated",
+      severity: "note",
+      message: "No solvent is stated; values for chlorinated solvents are preferred.",
+    });
+  }
+
+  let refusal = structure.refusal;
+  let result: ConformerResult | null = null;
+  if (refusal === null && structure.molecule !== null) {
+    result = analyseConformers(structure.molecule, structure.rings, context, request.temperature_K);
+    if (result === null) {
+      refusal = {
+        code: "unsupported-too-many-conformers",
+        message: "The rings and inverting nitrogens give more than 128 conformers.",
+        position: null,
+      };
+    }
+  }
+  if (refusal !== null) alerts.push({ code: refusal.code, severity: "stop", message: refusal.message });
+  if (result !== null) alerts.push(...conformerAlerts(result, structure.rings, context));
+
+  const open = result === null && refusal === null;
+  const members =
+    open && request.enumerateStereoisomers ? membersOf(structure, context, request, services) : [];
+  const order = ["stop", "caution", "note"];
+  return {
+    ok: true,
+    analysis: {
+      conditions,
+      identity: structure.identity,
+      structure: structure.structure,
+      rings,
+      conformers: result?.conformers ?? [],
+      relation: result?.relation ?? null,
+      equilibria: result?.equilibria ?? [],
+      temperatures: result?.temperatures ?? [],
+      members,
+      alerts: alerts
+        // Listing the members answers an open configuration; what is left is a caution.
+        .map((alert) =>
+          members.length > 0 && alert.code === "stereo-unspecified"
+            ? { ...alert, severity: "caution" as const }
+            : alert,
+        )
+        .sort((a, b) => order.indexOf(a.severity) - order.indexOf(b.severity)),
+      refusal,
+    },
+  };
+}
+
+function conditionsOf(request: AnalysisRequest, services: Services): Conditions {
+  const solvent = services.register.solvents.find((entry) => entry.key === request.solvent);
+  return {
+    temperature_K: request.temperature_K,
+    solvent: solvent?.key ?? "unstated",
+    solventLabel: solvent?.label ?? DEFAULT_LABEL,
+    medium: solvent?.medium ?? DEFAULT_MEDIUM,
+    stated: solvent !== undefined,
+  };
+}
+
+/** Each stereoisomer that an open structure may stand for, with its own major conformer. */
+function membersOf(
+  structure: StructureResult,
+  context: EnergyContext,
+  request: AnalysisRequest,
+  services: Services,
+): readonly MemberSummary[] {
+  return structure.members.flatMap((member) => {
+    const atoms = structure.rings.map((ring) => ring.atoms);
+    const numbering = structure.rings[0];
+    const locants =
+      numbering === undefined
+        ? null
+        : [1, 2, 3, 4, 5, 6].map((n) => numbering.atoms[numbering.locants.indexOf(n)]!);
+    const rings = analyseRings(member.molecule, atoms, locants, services);
+    const result = analyseConformers(member.molecule, rings, context, request.temperature_K);
+    const major = result?.conformers[0];
+    if (major === undefined) return [];
+    const labels = [...services.toolkit.descriptors(member.molecule).atoms].sort(([a], [b]) => a - b);
+    const configuration = rings.flatMap((ring) =>
+      configurationOf(ring).map(({ locants: pair, relation }) => `${relation}-${pair.join(",")}`),
+    );
+    const descriptors = labels.map(([atom, label]) => {
+      const ring = rings.find((entry) => entry.atoms.includes(atom));
+      const locant = ring === undefined ? `atom ${atom}` : `${ring.locants[ring.atoms.indexOf(atom)]}`;
+      return `${locant}${ring === undefined ? " " : ""}${label}`;
+    });
+    return [
+      {
+        canonicalSmiles: member.canonicalSmiles,
+        description: [configuration.join(", "), descriptors.length > 0 ? `(${descriptors.join(",")})` : ""]
+          .filter((part) => part !== "")
+          .join(" "),
+        majorLabel: major.label,
+        population: major.population,
+        population95: major.population95,
+      },
+    ];
+  });
+}

@@ -1,0 +1,136 @@
+import { orientationOf } from "../../conformers/Chair.ts";
+import type { EnergyContext } from "../../energetics/EnergyContext.ts";
+import { classOf } from "../../energetics/siteGroup.ts";
+import { labelText } from "../../quantity/labelText.ts";
+import type { AnalysedRing, Substituent } from "../../structure/StructureAnalysis.ts";
+import type { Alert } from "../Dossier.ts";
+import type { ConformerResult } from "./analyseConformers.ts";
+
+/** Above this the most stable chair is strained enough for a twist-boat to compete, kJ/mol (4 kcal/mol). */
+const STRAIN_LIMIT = 16.7;
+
+/** What a reader must know before trusting the populations, from the conformers and what they rest on. */
+export function conformerAlerts(
+  result: ConformerResult,
+  rings: readonly AnalysedRing[],
+  context: EnergyContext,
+): readonly Alert[] {
+  const alerts: Alert[] = [];
+  const add = (severity: Alert["severity"], code: string, message: string) =>
+    alerts.push({ code, severity, message });
+  const missing = result.deciding.filter((parameter) => parameter.basis === "not available");
+  const estimated = result.deciding.filter((parameter) => parameter.standing === "estimate");
+  const recalled = result.deciding.filter((parameter) => parameter.standing === "memory");
+  const list = (parameters: readonly { readonly id: string }[]) => parameters.map(({ id }) => id).join("; ");
+
+  if (missing.length > 0) {
+    add(
+      "caution",
+      "value-not-available",
+      `No register value for ${missing.length} contribution${missing.length > 1 ? "s" : ""} that tell${missing.length > 1 ? "" : "s"} the conformers apart; wide stand-ins are used: ${list(missing)}.`,
+    );
+  }
+  if (estimated.length > 0) {
+    add(
+      "caution",
+      "value-estimated",
+      `The result rests on register values marked as estimates: ${list(estimated)}.`,
+    );
+  }
+  if (recalled.length > 0) {
+    add(
+      "note",
+      "value-from-memory",
+      `Register values recalled from the literature and not seen again: ${list(recalled)}.`,
+    );
+  }
+  if (result.equilibria.some((equilibrium) => equilibrium.from === "A" && equilibrium.unresolved)) {
+    add(
+      "caution",
+      "major-unresolved",
+      "The interval of the free-energy difference contains zero: which conformer is the major one is unresolved.",
+    );
+  }
+  if (result.relation === "identical") {
+    add(
+      "note",
+      "identical-chairs",
+      "The two chairs are superimposable; ring inversion exchanges equal forms.",
+    );
+  }
+  if (result.relation === "enantiomeric") {
+    add(
+      "note",
+      "enantiomeric-chairs",
+      "Each chair is chiral and the other is its mirror image; they interconvert, so the substance is not chiral on the time average and is no racemate of separable enantiomers unless inversion is slow.",
+    );
+  }
+  const best = result.chairSets[0]!;
+  const axialBulky = best.flatMap((chair) =>
+    chair.ring.substituents.filter(
+      (group) => group.groupClass === "tertiary-alkyl" && orientationOf(chair, group) === "axial",
+    ),
+  );
+  const strain = result.conformers[0]!.sum_kJ_mol;
+  if (axialBulky.length > 0 || strain > STRAIN_LIMIT) {
+    const reason =
+      axialBulky.length > 0
+        ? `${axialBulky.map((group) => labelText(group.label)).join(", ")} is axial in the best chair`
+        : "the best chair carries more than 4 kcal/mol of charged contacts";
+    add(
+      "caution",
+      "non-chair-possible",
+      `A twist-boat may compete: ${reason}. Non-chair forms are not listed yet.`,
+    );
+  }
+  const pairs = donorPairs(rings, context);
+  if (pairs.length > 0) {
+    add(
+      "caution",
+      "hydrogen-bond",
+      `Intramolecular hydrogen bonds are possible (${pairs.join("; ")}); populations then depend on solvent and concentration more than the model shows.`,
+    );
+  }
+  if (rings.some((ring) => isPyranose(ring, context))) {
+    add(
+      "caution",
+      "pyranose",
+      "Polyhydroxylated oxane: single-group values are not meant for pyranoses in water; treat the populations as rough.",
+    );
+  }
+  if (rings.some((ring) => ring.ringKey.endsWith("/NH") || ring.ringKey.endsWith("/NH2+"))) {
+    add(
+      "note",
+      "nh-places",
+      "The places of hydrogen on the ring nitrogen are not told apart; each conformer stands for both.",
+    );
+  }
+  return alerts;
+}
+
+/** Donor beside a polar group, on neighbouring ring atoms or 1,3 to it. */
+function donorPairs(rings: readonly AnalysedRing[], context: EnergyContext): readonly string[] {
+  const found: string[] = [];
+  for (const ring of rings) {
+    const polar = ring.substituents.filter((group) => classOf(context.register, group).polar);
+    const at = (group: Substituent) => ring.atoms.indexOf(group.ringAtom);
+    polar.forEach((a, i) => {
+      for (const b of polar.slice(i + 1)) {
+        const steps = Math.abs(at(a) - at(b));
+        const distance = Math.min(steps, 6 - steps);
+        if (distance === 0 || distance > 2) continue;
+        if (!classOf(context.register, a).donor && !classOf(context.register, b).donor) continue;
+        found.push(`${labelText(a.label)} and ${labelText(b.label)} 1,${distance + 1}`);
+      }
+    });
+  }
+  return found;
+}
+
+/** An oxane with three or more oxygen groups in a protic medium. */
+function isPyranose(ring: AnalysedRing, context: EnergyContext): boolean {
+  const oxygens = ring.substituents.filter((group) =>
+    ["hydroxyl", "alkoxy", "acyloxy"].includes(group.groupClass),
+  );
+  return ring.parent === "oxane" && oxygens.length >= 3 && context.medium === "protic";
+}

@@ -1,0 +1,124 @@
+import type { Diagnostic } from "../diagnostics/Diagnostic.ts";
+import { type Analysis, analyseCompound } from "./analysis/analyseCompound.ts";
+import type { Services } from "./analysis/Services.ts";
+import { writeConclusion } from "./analysis/writeConclusion.ts";
+import { canonicalJson } from "./canonicalJson.ts";
+import type { CompoundInput } from "./content/CompoundInput.ts";
+import { DOSSIER_SCHEMA_VERSION, type Dossier, type SourceNote } from "./Dossier.ts";
+import { sha256 } from "./sha256.ts";
+
+/**
+ * Analyses one compound as its author defined it. Every problem is a diagnostic at its place in the file; none is
+ * thrown. A structure that cannot be read gives no dossier; one that is understood and not analysed gives a dossier
+ * that says so.
+ */
+export function buildDossier(
+  input: CompoundInput,
+  services: Services,
+): { readonly dossier: Dossier | null; readonly diagnostics: readonly Diagnostic[] } {
+  const answer = analyseCompound(
+    {
+      smiles: input.structure.smiles,
+      ringLocants: input.structure.ringLocants,
+      temperature_K: input.temperature_K,
+      solvent: input.solvent,
+      enumerateStereoisomers: input.enumerateStereoisomers,
+    },
+    services,
+  );
+  if (!answer.ok) {
+    const { refusal } = answer;
+    return {
+      dossier: null,
+      diagnostics: [refusalDiagnostic(input, refusal.code, refusal.message, refusal.position)],
+    };
+  }
+  const { analysis } = answer;
+  const diagnostics: Diagnostic[] = [];
+  if (analysis.refusal !== null) {
+    diagnostics.push({
+      code: analysis.refusal.code,
+      severity: "caution",
+      place: input.place(["structure"]),
+      message: `${analysis.refusal.message} The dossier shows the identity and no conformers.`,
+    });
+  }
+  const open = analysis.alerts.find(
+    (alert) => alert.code === "stereo-unspecified" && alert.severity === "stop",
+  );
+  if (open !== undefined && analysis.refusal === null) {
+    diagnostics.push({
+      code: "stereo-unspecified",
+      severity: "caution",
+      place: input.place(["structure"]),
+      message: `${open.message} Write "stereoisomers: enumerate" to list every member.`,
+    });
+  }
+  diagnostics.push(...claimDiagnostics(input, analysis));
+  return { dossier: assemble(input, analysis, services), diagnostics };
+}
+
+function assemble(input: CompoundInput, analysis: Analysis, services: Services): Dossier {
+  const { refusal: _refusal, ...parts } = analysis;
+  const record: Dossier = {
+    schemaVersion: DOSSIER_SCHEMA_VERSION,
+    program: services.program,
+    register: { version: services.register.version, sha256: services.register.sha256 },
+    input: { file: input.file.path, sha256: input.file.sha256 },
+    resultSha256: "",
+    code: input.code,
+    slug: input.slug,
+    series: input.series,
+    name: input.name,
+    prose: input.prose,
+    ...parts,
+    conclusion: writeConclusion({ name: input.name, ...parts }),
+    claim: input.claim,
+    evidence: input.evidence,
+    review: input.review,
+    sources: sourcesOf(analysis, services),
+  };
+  return { ...record, resultSha256: sha256(canonicalJson(record)) };
+}
+
+function sourcesOf(analysis: Analysis, services: Services): readonly SourceNote[] {
+  const keys = analysis.conformers.flatMap((conformer) =>
+    conformer.contributions.flatMap((c) => c.sourceKeys),
+  );
+  return [...new Set(keys)].sort().map((key) => {
+    const citation = services.register.citations.find((entry) => entry.key === key);
+    if (citation === undefined) throw new Error(`the register has no citation ${key}`);
+    return { key, text: citation.text, standing: citation.standing };
+  });
+}
+
+/** Points into the SMILES itself where the character is known and the author wrote it as one plain value. */
+function refusalDiagnostic(
+  input: CompoundInput,
+  code: string,
+  message: string,
+  position: number | null,
+): Diagnostic {
+  const whole = input.place(["structure"]);
+  const at = position === null ? -1 : (whole.sourceLine?.indexOf(input.structure.smiles) ?? -1);
+  const place = at < 0 || position === null ? whole : { ...whole, column: at + position + 1, length: 1 };
+  return { code, severity: "error", place, message: `${message} Found "${input.structure.smiles}".` };
+}
+
+/** A cis or trans claim that the structure contradicts is an error; elsewhere claims are recorded as written. */
+function claimDiagnostics(input: CompoundInput, analysis: Analysis): readonly Diagnostic[] {
+  const claimed = input.claim?.configuration;
+  if (claimed !== "cis" && claimed !== "trans") return [];
+  const pairs = analysis.rings.flatMap((ring) => ring.configuration);
+  const open = analysis.identity.stereocentres.some((centre) => centre.descriptor === "unspecified");
+  if (pairs.length !== 1 || open || pairs[0]!.relation === claimed) return [];
+  return [
+    {
+      code: "claim-contradicts-structure",
+      severity: "error",
+      place: input.place(["claim", "configuration"]),
+      message: `The claim says ${claimed}, but the groups at ${pairs[0]!.locants.join(" and ")} of the structure are ${pairs[0]!.relation}.`,
+      suggestion: pairs[0]!.relation,
+    },
+  ];
+}
