@@ -3,7 +3,7 @@ import { chiralityOf } from "../../structure/chiralityOf.ts";
 import { findOpenCentres, type OpenStereo } from "../../structure/findOpenCentres.ts";
 import { findOpenDoubleBonds } from "../../structure/findOpenDoubleBonds.ts";
 import { findRings } from "../../structure/findRings.ts";
-import { type Molecule, withSenses } from "../../structure/Molecule.ts";
+import { mirrorImage, type Molecule, withSenses } from "../../structure/Molecule.ts";
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type { Alert, Identity, Stereocentre, Structure } from "../Dossier.ts";
 import type { Services } from "./Services.ts";
@@ -86,15 +86,8 @@ function chooseMember(
   for (const member of open.members) {
     const bare = withSenses(member.molecule, outside);
     const form = services.toolkit.canonicalSmiles(bare);
-    const mirrored = services.toolkit.canonicalSmiles({
-      ...bare,
-      atoms: bare.atoms.map((atom) =>
-        atom.stereo === null
-          ? atom
-          : { ...atom, stereo: atom.stereo === "cw" ? ("ccw" as const) : ("cw" as const) },
-      ),
-    });
-    ringsOnly.add(form < mirrored ? form : mirrored);
+    const mirrored = services.toolkit.canonicalSmiles(mirrorImage(bare));
+    ringsOnly.add([form, mirrored].sort()[0]!);
   }
   return ringsOnly.size === 1 ? first!.molecule : null;
 }
