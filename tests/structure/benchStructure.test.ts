@@ -1,14 +1,14 @@
 import { createRequire } from "node:module";
-import type { RDKitLoader, RDKitModule } from "@rdkit/rdkit";
+import type { MainModule } from "@rdkit/rdkit";
 import fc from "fast-check";
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Group, RingParent } from "../../src/register/Register.ts";
 import { benchStructure, type FaceGroups } from "../../src/structure/benchStructure.ts";
 import { ringAtomCapacity } from "../../src/structure/ringAtomCapacity.ts";
 
-let rdkit: RDKitModule;
+let rdkit: MainModule;
 beforeAll(async () => {
-  const initialise = createRequire(import.meta.url)("@rdkit/rdkit") as RDKitLoader;
+  const initialise = createRequire(import.meta.url)("@rdkit/rdkit") as () => Promise<MainModule>;
   rdkit = await initialise();
 });
 
@@ -62,7 +62,7 @@ const PARENTS: readonly RingParent[] = [
 const bench = (parent: RingParent, groups: Record<number, FaceGroups>) =>
   benchStructure(parent, new Map(Object.entries(groups).map(([locant, faces]) => [Number(locant), faces])));
 
-function withMol<T>(smiles: string, use: (mol: NonNullable<ReturnType<RDKitModule["get_mol"]>>) => T): T {
+function withMol<T>(smiles: string, use: (mol: NonNullable<ReturnType<MainModule["get_mol"]>>) => T): T {
   const mol = rdkit.get_mol(smiles);
   if (mol === null) throw new Error(`RDKit refuses ${smiles}`);
   try {

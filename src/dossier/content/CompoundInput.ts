@@ -28,6 +28,8 @@ export interface CompoundInput {
   readonly name: string;
   readonly structure: StructureInput;
   readonly temperature_K: number;
+  /** True when the compound or its series states the temperature; false for the default of 298.15 K. */
+  readonly temperatureStated: boolean;
   /** Register key of the solvent, or null when neither compound nor series states one. */
   readonly solvent: string | null;
   /** True when the author allows open stereocentres and wants every member listed. */
@@ -36,8 +38,11 @@ export interface CompoundInput {
   readonly evidence: readonly EvidenceItem[];
   readonly review: readonly ReviewEntry[];
   readonly prose: { readonly markdown: string; readonly firstLine: number };
-  /** Where a key stands in the file, e.g. `place(["structure"])`, `place(["conditions", "temperature"])`. */
-  readonly place: (path: readonly (string | number)[]) => Place;
+  /**
+   * Where a value stands in the file, e.g. `place(["structure"])`, `place(["conditions", "temperature"])`;
+   * its nearest ancestor when it is absent. `character` (from 0) counts into a text: `place(["structure"], 12)`.
+   */
+  readonly place: (path: readonly (string | number)[], character?: number) => Place;
 }
 
 export interface StructureInput {
