@@ -65,11 +65,28 @@ export function findRings(molecule: Molecule): RingSearch {
     accepted.sort((a, b) => Math.min(...a) - Math.min(...b));
     return { ok: true, rings: accepted, unanalysed };
   }
-  const refusal = unanalysed[0] ?? {
-    code: "unsupported-no-six-ring" as const,
-    message: "The molecule has no saturated six-membered ring.",
-  };
+  const hidden = hiddenSixRing(molecule);
+  const refusal = (hidden ? null : unanalysed[0]) ??
+    (hidden
+      ? {
+          code: "unsupported-bridged-ring" as const,
+          message: "The molecule holds a six-membered ring inside a bridged system; not analysed yet.",
+        }
+      : null) ?? {
+      code: "unsupported-no-six-ring" as const,
+      message: "The molecule has no saturated six-membered ring.",
+    };
   return { ok: false, refusal };
+}
+
+/** A six-membered path around a bridge that the smallest rings do not list, as in norbornane. */
+function hiddenSixRing(molecule: Molecule): boolean {
+  return molecule.rings.some((a, i) =>
+    molecule.rings.slice(i + 1).some((b) => {
+      const common = a.filter((atom) => b.includes(atom)).length;
+      return common > 2 && a.length + b.length - 2 * (common - 1) === 6;
+    }),
+  );
 }
 
 function unsaturation(
