@@ -65,17 +65,19 @@ export function findRings(molecule: Molecule): RingSearch {
     accepted.sort((a, b) => Math.min(...a) - Math.min(...b));
     return { ok: true, rings: accepted, unanalysed };
   }
-  const hidden = hiddenSixRing(molecule);
-  const refusal = (hidden ? null : unanalysed[0]) ??
-    (hidden
-      ? {
-          code: "unsupported-bridged-ring" as const,
-          message: "The molecule holds a six-membered ring inside a bridged system; not analysed yet.",
-        }
-      : null) ?? {
-      code: "unsupported-no-six-ring" as const,
-      message: "The molecule has no saturated six-membered ring.",
+  if (hiddenSixRing(molecule)) {
+    return {
+      ok: false,
+      refusal: {
+        code: "unsupported-bridged-ring",
+        message: "The molecule holds a six-membered ring inside a bridged system; not analysed yet.",
+      },
     };
+  }
+  const refusal = unanalysed[0] ?? {
+    code: "unsupported-no-six-ring" as const,
+    message: "The molecule has no saturated six-membered ring.",
+  };
   return { ok: false, refusal };
 }
 
