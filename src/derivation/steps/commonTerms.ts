@@ -2,7 +2,7 @@ import type { Dossier } from "../../dossier/Dossier.ts";
 import type { DerivationStep } from "../DerivationStep.ts";
 import { numberContributions } from "../numberContributions.ts";
 import { texAligned } from "../texAligned.ts";
-import { texEnergy } from "../texNumbers.ts";
+import { texEnergy } from "../texEnergy.ts";
 import { texSum } from "../texSum.ts";
 
 /** Contributions that every conformer has alike: they drop out of every difference, and it is said. */

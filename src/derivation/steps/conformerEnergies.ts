@@ -1,10 +1,12 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
 import type { DerivationStep } from "../DerivationStep.ts";
 import { numberContributions } from "../numberContributions.ts";
+import { shownConformers } from "../shownConformers.ts";
+import { shownNotice } from "../shownNotice.ts";
 import { texAligned } from "../texAligned.ts";
-import { KILOJOULE_PER_MOLE, texConformer, texEnergy } from "../texNumbers.ts";
+import { texConformer } from "../texConformer.ts";
+import { KILOJOULE_PER_MOLE, texEnergy } from "../texEnergy.ts";
 import { texSum } from "../texSum.ts";
-import { shownConformers, shownNotice } from "./shownConformers.ts";
 
 /** G° of each conformer as the sum of its contributions, numbered as in the energy table. */
 export function conformerEnergies(dossier: Dossier): DerivationStep {
@@ -24,6 +26,7 @@ export function conformerEnergies(dossier: Dossier): DerivationStep {
     return [`${head} ${first}`, ...more, `&= ${total}`];
   });
   const bare = shown.some((conformer) => conformer.contributions.length === 0);
+  const notice = shownNotice(dossier);
   return {
     id: "energies",
     title: "Energy of each conformer",
@@ -31,7 +34,7 @@ export function conformerEnergies(dossier: Dossier): DerivationStep {
       "Each conformer’s free energy is the sum of its contributions; the number under each is its row in the energy table." +
       (bare ? " A conformer without any contribution is the zero of this scale." : "") +
       " Numbers are rounded for print and calculated unrounded." +
-      shownNotice(dossier),
+      (notice === "" ? "" : ` ${notice}`),
     tex: texAligned(lines),
     where: rows
       .filter((row) => shown.some(({ id }) => row.conformers.includes(id)))

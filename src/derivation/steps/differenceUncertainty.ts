@@ -1,11 +1,11 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
 import { toDecimals } from "../../quantity/toDecimals.ts";
 import type { DerivationKey, DerivationStep } from "../DerivationStep.ts";
+import { shownEquilibria } from "../shownEquilibria.ts";
 import { texAligned } from "../texAligned.ts";
-import { KILOJOULE_PER_MOLE, texEnergy } from "../texNumbers.ts";
+import { KILOJOULE_PER_MOLE, texEnergy } from "../texEnergy.ts";
 import { texSum } from "../texSum.ts";
 import { varianceTerms } from "../varianceTerms.ts";
-import { shownEquilibria } from "./shownConformers.ts";
 import { texDifference } from "./texDifference.ts";
 
 /** A factor times an uncertainty, squared, is wider than a plain number. */

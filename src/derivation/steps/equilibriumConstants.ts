@@ -2,10 +2,12 @@ import type { Dossier } from "../../dossier/Dossier.ts";
 import { toDecimals } from "../../quantity/toDecimals.ts";
 import { GAS_CONSTANT } from "../../quantity/units.ts";
 import type { DerivationStep } from "../DerivationStep.ts";
+import { shownEquilibria } from "../shownEquilibria.ts";
 import { texAligned } from "../texAligned.ts";
-import { KILOJOULE_PER_MOLE, texEnergy, texSignificant } from "../texNumbers.ts";
-import { shownEquilibria } from "./shownConformers.ts";
-import { texConstant, texDifference } from "./texDifference.ts";
+import { KILOJOULE_PER_MOLE, texEnergy } from "../texEnergy.ts";
+import { texSignificant } from "../texSignificant.ts";
+import { texConstant } from "./texConstant.ts";
+import { texDifference } from "./texDifference.ts";
 
 /** K = exp(−ΔG°/RT) of each conformer against the most stable one, with R and T in numbers. */
 export function equilibriumConstants(dossier: Dossier): DerivationStep {

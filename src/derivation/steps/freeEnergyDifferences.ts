@@ -1,8 +1,9 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
 import type { DerivationStep } from "../DerivationStep.ts";
+import { shownEquilibria } from "../shownEquilibria.ts";
 import { texAligned } from "../texAligned.ts";
-import { KILOJOULE_PER_MOLE, texConformer, texEnergy } from "../texNumbers.ts";
-import { shownEquilibria } from "./shownConformers.ts";
+import { texConformer } from "../texConformer.ts";
+import { KILOJOULE_PER_MOLE, texEnergy } from "../texEnergy.ts";
 import { texDifference } from "./texDifference.ts";
 
 /** Difference between the sums and the record that rounding explains, kJ/mol. */

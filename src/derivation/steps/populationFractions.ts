@@ -1,9 +1,12 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
 import type { DerivationStep } from "../DerivationStep.ts";
+import { shownConformers } from "../shownConformers.ts";
+import { shownNotice } from "../shownNotice.ts";
 import { texAligned } from "../texAligned.ts";
-import { texConformer, texFraction, texSignificant } from "../texNumbers.ts";
+import { texConformer } from "../texConformer.ts";
+import { texFraction } from "../texFraction.ts";
+import { texSignificant } from "../texSignificant.ts";
 import { texSum } from "../texSum.ts";
-import { shownConformers, shownNotice } from "./shownConformers.ts";
 
 /** Share of each conformer, from the constants. */
 export function populationFractions(dossier: Dossier): DerivationStep {
@@ -14,7 +17,7 @@ export function populationFractions(dossier: Dossier): DerivationStep {
     title: "Populations",
     words: two
       ? `The two populations add up to 1${symmetric ? ", so each is one half exactly" : ""}.`
-      : `Each population is the conformer’s constant over the sum of all, with K = 1 for the first.${shownNotice(dossier)}`,
+      : `Each population is the conformer’s constant over the sum of all, with K = 1 for the first. ${shownNotice(dossier)}`.trim(),
     tex: texAligned(two ? twoStates(dossier) : manyStates(dossier)),
     where: [],
   };

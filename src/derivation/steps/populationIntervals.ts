@@ -2,9 +2,12 @@ import type { Conformer, Dossier, Equilibrium } from "../../dossier/Dossier.ts";
 import { toDecimals } from "../../quantity/toDecimals.ts";
 import { NORMAL_95 } from "../../quantity/units.ts";
 import type { DerivationStep } from "../DerivationStep.ts";
+import { shownConformers } from "../shownConformers.ts";
 import { texAligned } from "../texAligned.ts";
-import { KILOJOULE_PER_MOLE, texConformer, texEnergy, texFraction, texSignificant } from "../texNumbers.ts";
-import { shownConformers } from "./shownConformers.ts";
+import { texConformer } from "../texConformer.ts";
+import { KILOJOULE_PER_MOLE, texEnergy } from "../texEnergy.ts";
+import { texFraction } from "../texFraction.ts";
+import { texSignificant } from "../texSignificant.ts";
 
 /** Number of standard deviations, as printed. */
 const FACTOR = toDecimals(NORMAL_95, 2);

@@ -1,0 +1,73 @@
+import { escapeHtml } from "../quantity/escapeHtml.ts";
+import { labelHtml } from "../quantity/labelHtml.ts";
+import { STANDINGS, standingMark } from "./standingMark.ts";
+import type { Cell, Column, Row, TableModel } from "./TableModel.ts";
+
+export interface TableOptions {
+  /** Begins every id, unique on the page, e.g. the dossier's slug; default none. */
+  readonly idPrefix?: string;
+  /** Set before the caption: `Table 2.` */
+  readonly number?: string;
+}
+
+/**
+ * A table model as HTML: captioned, with scoped headings, in a region that scrolls sideways by keyboard too.
+ * Every text is escaped; markup comes from label markup only.
+ */
+export function renderTable(model: TableModel, options: TableOptions = {}): string {
+  const prefix = options.idPrefix === undefined || options.idPrefix === "" ? "" : `${options.idPrefix}-`;
+  const id = escapeHtml(`${prefix}table-${model.id}`);
+  const number =
+    options.number === undefined ? "" : `<span class="caption-number">${escapeHtml(options.number)}</span> `;
+  const spoken = [options.number, model.caption].filter((part) => part !== undefined).join(" ");
+  const body = model.rows.map((row) => renderRow(row, model.columns, id));
+  return [
+    `<div class="table-scroll" role="region" tabindex="0" aria-label="${escapeHtml(spoken)}">`,
+    `<table class="table table-${escapeHtml(model.id)}" id="${id}">`,
+    `<caption>${number}${escapeHtml(model.caption)}</caption>`,
+    `<thead>\n<tr>${model.columns.map(heading).join("")}</tr>\n</thead>`,
+    `<tbody>\n${body.join("\n")}\n</tbody>`,
+    "</table>",
+    "</div>",
+    ...notes(model.notes),
+  ].join("\n");
+}
+
+function heading(column: Column): string {
+  const unit = column.unit === undefined ? "" : ` <span class="unit">${escapeHtml(column.unit)}</span>`;
+  const description =
+    column.description === undefined
+      ? ""
+      : ` <span class="column-description">${labelHtml(column.description)}</span>`;
+  return `<th scope="col" class="align-${column.align}">${escapeHtml(column.title)}${unit}${description}</th>`;
+}
+
+function renderRow(row: Row, columns: readonly Column[], tableId: string): string {
+  const id = row.id === undefined ? "" : ` id="${tableId}-${escapeHtml(row.id)}"`;
+  const kind = row.kind === undefined ? "" : ` class="row-${row.kind}"`;
+  const cells = columns.map((column, index) => renderCell(row.cells[index] ?? { text: "" }, column));
+  return `<tr${id}${kind}>${cells.join("")}</tr>`;
+}
+
+function renderCell(cell: Cell, column: Column): string {
+  const value = cell.sortValue === undefined ? "" : ` data-sort="${cell.sortValue}"`;
+  const attributes = `class="align-${column.align}"${value}`;
+  const text = cell.markup === true ? labelHtml(cell.text) : escapeHtml(cell.text);
+  const linked = cell.href === undefined ? text : `<a href="${escapeHtml(cell.href)}">${text}</a>`;
+  const content = `${mark(cell)}${linked}`;
+  return column.rowHeader === true
+    ? `<th scope="row" ${attributes}>${content}</th>`
+    : `<td ${attributes}>${content}</td>`;
+}
+
+/** The word of the mark is left to the text where the text says it. */
+function mark(cell: Cell): string {
+  if (cell.standing === undefined) return "";
+  const said = cell.text.includes(STANDINGS[cell.standing].word);
+  return `${standingMark(cell.standing, said ? "none" : "spoken")}\u00a0`;
+}
+
+function notes(sentences: readonly string[]): readonly string[] {
+  if (sentences.length === 0) return [];
+  return [`<div class="table-notes">${sentences.map((note) => `<p>${escapeHtml(note)}</p>`).join("")}</div>`];
+}
