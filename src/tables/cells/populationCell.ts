@@ -2,16 +2,17 @@ import { formatPopulation } from "../../quantity/formatPopulation.ts";
 import type { Cell } from "../TableModel.ts";
 
 /**
- * A population, which never stands without its interval.
+ * A population, which never stands without its interval, marked as calculated unless symmetry makes it exact.
  *
  * @param population - fraction, 0 to 1.
  * @param interval - end points of the 95 % interval, fractions.
  */
 export function populationCell(population: number, interval: readonly [number, number]): Cell {
+  const exact = interval[0] === interval[1];
   return {
     text: formatPopulation(population, interval),
     sortValue: population,
     numbers: [population, ...interval].map((fraction) => 100 * fraction),
-    ...(interval[0] === interval[1] ? { standing: "symmetry" as const } : {}),
+    ...(exact && population === 1 ? {} : { standing: exact ? "symmetry" : "computed" }),
   };
 }
