@@ -8,10 +8,10 @@ import {
   type PageKind,
 } from "./Directive.ts";
 import { findDirectives } from "./findDirectives.ts";
+import { sourceText } from "./frontMatter/SourceText.ts";
 import { maskCode } from "./maskCode.ts";
-import { quote } from "./quote.ts";
-import { sourceText } from "./SourceText.ts";
-import { suggest } from "./suggest.ts";
+import { quote } from "./values/quote.ts";
+import { suggest } from "./values/suggest.ts";
 
 const KINDS: readonly DirectiveKind[] = ["figure", "table", "derivation", "value"];
 /** A tag or comment as Markdown would take it: `<b>`, `</b>`, `<img src=x>`, `<!-- -->`; not `<https://…>`. */

@@ -1,14 +1,14 @@
 import * as z from "zod";
 import type { Register } from "../../register/Register.ts";
-import { describeFound } from "./describeFound.ts";
 import { evidenceSchema } from "./evidenceSchema.ts";
 import { type FieldDescription, field } from "./field.ts";
-import { problem } from "./Reading.ts";
-import { readCode } from "./readCode.ts";
-import { readDate } from "./readDate.ts";
-import { readTemperature } from "./readTemperature.ts";
-import { readText } from "./readText.ts";
-import { registerWords } from "./registerWords.ts";
+import { describeFound } from "./values/describeFound.ts";
+import { problem } from "./values/Reading.ts";
+import { readCode } from "./values/readCode.ts";
+import { readDate } from "./values/readDate.ts";
+import { readTemperature } from "./values/readTemperature.ts";
+import { readText } from "./values/readText.ts";
+import { registerWords } from "./values/registerWords.ts";
 
 /** Code words of the CIF core dictionary for how an absolute configuration was established. */
 export const CLAIM_BASES = ["rm", "ad", "rmad", "syn", "unk"] as const;
@@ -90,7 +90,10 @@ export function contentSchema(register: Register) {
     (found) =>
       typeof found === "string" && found.trim() !== ""
         ? { value: found.trim() }
-        : problem("wrong-type", `Here stands ${describeFound(found)}; a SMILES is needed.`),
+        : problem(
+            "wrong-type",
+            `Here stands ${describeFound(found)}; a SMILES, or a set of the keys ring and groups, is needed.`,
+          ),
     { description: "OpenSMILES of the whole compound", examples: ["C[C@H]1CC[C@@H](O)CC1"] },
   );
 

@@ -1,12 +1,12 @@
 import * as z from "zod";
-import { describeFound } from "./describeFound.ts";
 import { type FieldDescription, field } from "./field.ts";
-import { QUANTITY_KINDS } from "./quantityKinds.ts";
-import { problem, type Reading } from "./Reading.ts";
-import { readQuantity } from "./readQuantity.ts";
-import { readTemperature } from "./readTemperature.ts";
-import { readText } from "./readText.ts";
-import type { RegisterWords } from "./registerWords.ts";
+import { describeFound } from "./values/describeFound.ts";
+import { QUANTITY_KINDS } from "./values/quantityKinds.ts";
+import { problem, type Reading } from "./values/Reading.ts";
+import { readQuantity } from "./values/readQuantity.ts";
+import { readTemperature } from "./values/readTemperature.ts";
+import { readText } from "./values/readText.ts";
+import type { RegisterWords } from "./values/registerWords.ts";
 
 /** Kinds of evidence; an item holds exactly one of these keys. */
 export const EVIDENCE_KINDS = [

@@ -1,5 +1,5 @@
 import * as z from "zod";
-import type { Reading } from "./Reading.ts";
+import type { Reading } from "./values/Reading.ts";
 
 /** What an editor is told about a value. */
 export interface FieldDescription {

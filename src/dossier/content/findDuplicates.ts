@@ -1,7 +1,7 @@
 import type { Diagnostic, Place } from "../../diagnostics/Diagnostic.ts";
-import { quote } from "./quote.ts";
 import type { CompoundReading } from "./readCompound.ts";
-import { slugOf } from "./slugOf.ts";
+import { quote } from "./values/quote.ts";
+import { slugOf } from "./values/slugOf.ts";
 
 /**
  * Codes given twice, also those that differ only in case or punctuation: their pages would have one

@@ -39,15 +39,17 @@ function maskSpans(text: string): string {
   const runs = [...text.matchAll(/`+/g)];
   let result = "";
   let done = 0;
+  let paragraphEnd = -1;
   for (let index = 0; index < runs.length; index += 1) {
     const opening = runs[index]!;
     if (opening.index < done || text[opening.index - 1] === "\\") continue;
-    const paragraphEnd = text.indexOf("\n\n", opening.index);
+    if (paragraphEnd < opening.index) {
+      const blank = text.indexOf("\n\n", opening.index);
+      paragraphEnd = blank === -1 ? text.length : blank;
+    }
     const closing = runs
       .slice(index + 1, index + 200)
-      .find(
-        (run) => run[0].length === opening[0].length && (paragraphEnd === -1 || run.index < paragraphEnd),
-      );
+      .find((run) => run[0].length === opening[0].length && run.index < paragraphEnd);
     if (closing === undefined) continue;
     const end = closing.index + closing[0].length;
     result += text.slice(done, opening.index) + text.slice(opening.index, end).replace(/[^\n]/g, " ");

@@ -3,12 +3,12 @@ import type { Claim } from "../Dossier.ts";
 import type { AttachedFile, CompoundInput, ContentFile } from "./CompoundInput.ts";
 import { checkProse } from "./checkProse.ts";
 import type { ContentSchema } from "./contentSchema.ts";
-import { explainIssues } from "./explainIssues.ts";
+import { explainIssues } from "./issues/explainIssues.ts";
 import { parseFrontMatter } from "./parseFrontMatter.ts";
 import { readEvidence } from "./readEvidence.ts";
 import { readStructure } from "./readStructure.ts";
 import type { SeriesDefaults } from "./SeriesDefaults.ts";
-import { slugOf } from "./slugOf.ts";
+import { slugOf } from "./values/slugOf.ts";
 
 /** Room temperature as the trade tabulates it, used where nobody states another. */
 const DEFAULT_TEMPERATURE_K = 298.15;

@@ -4,14 +4,14 @@ import type { Register } from "../../register/Register.ts";
 import type { AttachedFile, CompoundInput, ContentFile, ContentInput, SeriesInput } from "./CompoundInput.ts";
 import { contentSchema } from "./contentSchema.ts";
 import { findDuplicates } from "./findDuplicates.ts";
-import { quote } from "./quote.ts";
 import { type CompoundReading, readCompound } from "./readCompound.ts";
 import { readSeries } from "./readSeries.ts";
 import { readSite } from "./readSite.ts";
 import { NO_DEFAULTS } from "./SeriesDefaults.ts";
-import { slugOf } from "./slugOf.ts";
-import { suggest } from "./suggest.ts";
 import { titleFromSlug } from "./titleFromSlug.ts";
+import { quote } from "./values/quote.ts";
+import { slugOf } from "./values/slugOf.ts";
+import { suggest } from "./values/suggest.ts";
 
 const byPath = (a: { path: string }, b: { path: string }) => (a.path < b.path ? -1 : a.path > b.path ? 1 : 0);
 

@@ -4,9 +4,9 @@ import type { EvidenceItem } from "../Dossier.ts";
 import type { AttachedFile, ContentFile } from "./CompoundInput.ts";
 import type { ContentSchema } from "./contentSchema.ts";
 import { EVIDENCE_KINDS, type evidenceSchema } from "./evidenceSchema.ts";
-import { findAttached } from "./findAttached.ts";
 import type { FrontMatter } from "./parseFrontMatter.ts";
-import type { WrittenQuantity } from "./readQuantity.ts";
+import { findAttached } from "./values/findAttached.ts";
+import type { WrittenQuantity } from "./values/readQuantity.ts";
 
 type Evidence = z.output<ReturnType<typeof evidenceSchema>>;
 

@@ -2,7 +2,7 @@ import type { Diagnostic } from "../../diagnostics/Diagnostic.ts";
 import type { ContentFile, SeriesInput } from "./CompoundInput.ts";
 import { checkProse } from "./checkProse.ts";
 import type { ContentSchema } from "./contentSchema.ts";
-import { explainIssues } from "./explainIssues.ts";
+import { explainIssues } from "./issues/explainIssues.ts";
 import { parseFrontMatter } from "./parseFrontMatter.ts";
 import { NO_DEFAULTS, type SeriesDefaults } from "./SeriesDefaults.ts";
 import { titleFromSlug } from "./titleFromSlug.ts";

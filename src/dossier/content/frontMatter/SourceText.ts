@@ -1,5 +1,5 @@
-import type { Place } from "../../diagnostics/Diagnostic.ts";
-import type { ContentFile } from "./CompoundInput.ts";
+import type { Place } from "../../../diagnostics/Diagnostic.ts";
+import type { ContentFile } from "../CompoundInput.ts";
 
 /** A content file's text with the means to say where a piece of it stands. */
 export interface SourceText {

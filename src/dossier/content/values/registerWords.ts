@@ -1,4 +1,4 @@
-import type { Group, Register, RingParent, Solvent } from "../../register/Register.ts";
+import type { Group, Register, RingParent, Solvent } from "../../../register/Register.ts";
 import { quote } from "./quote.ts";
 import { problem, type Reading } from "./Reading.ts";
 import { readText } from "./readText.ts";

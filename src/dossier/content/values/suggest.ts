@@ -1,4 +1,4 @@
-import { nearestWord } from "../../diagnostics/nearestWord.ts";
+import { nearestWord } from "../../../diagnostics/nearestWord.ts";
 
 /** Beyond this a word is not a slip of another one, and comparing it would only cost time. */
 const LONGEST_WORD = 60;

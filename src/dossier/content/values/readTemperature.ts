@@ -1,4 +1,4 @@
-import { ZERO_CELSIUS } from "../../quantity/units.ts";
+import { ZERO_CELSIUS } from "../../../quantity/units.ts";
 import { quote } from "./quote.ts";
 import { problem, type Reading } from "./Reading.ts";
 import { readQuantity, type WrittenQuantity } from "./readQuantity.ts";

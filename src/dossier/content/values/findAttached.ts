@@ -1,4 +1,4 @@
-import type { AttachedFile } from "./CompoundInput.ts";
+import type { AttachedFile } from "../CompoundInput.ts";
 import { quote } from "./quote.ts";
 import { problem, type Reading } from "./Reading.ts";
 import { suggest } from "./suggest.ts";

@@ -1,0 +1,52 @@
+import { type Document, isMap, isScalar, parseDocument } from "yaml";
+import { type ReportAt, reportYamlProblems } from "./reportYamlProblems.ts";
+
+/** Aliases may repeat a value, but not multiply it (a few lines can otherwise stand for gigabytes). */
+const MOST_ALIASES = 20;
+
+/**
+ * Reads a set of keys from YAML text as plain data, or reports why not and gives null. The parser recurses,
+ * so very deep nesting ends in a stack overflow, which is caught like any other refusal.
+ */
+export function readYaml(
+  yaml: string,
+  report: ReportAt,
+): { readonly document: Document.Parsed; readonly data: Readonly<Record<string, unknown>> } | null {
+  let document: Document.Parsed;
+  try {
+    document = parseDocument(yaml, {
+      version: "1.2",
+      schema: "core",
+      strict: true,
+      uniqueKeys: true,
+      stringKeys: true,
+      merge: false,
+      prettyErrors: false,
+      // At `silent` the parser would drop a second document without a word.
+      logLevel: "error",
+    });
+    if (reportYamlProblems(document, yaml, report)) return null;
+  } catch {
+    report("broken-yaml", 0, 1, "Lists or keys are nested too deeply.");
+    return null;
+  }
+  const { contents } = document;
+  if (contents === null || (isScalar(contents) && contents.value === null)) return { document, data: {} };
+  if (!isMap(contents)) {
+    const [from, to] = contents.range;
+    const hint = /\w:\S/.test(yaml) ? " A colon must be followed by a space." : "";
+    report("not-a-map", from, to - from, `The front matter must be a set of keys with values.${hint}`);
+    return null;
+  }
+  try {
+    return { document, data: document.toJS({ maxAliasCount: MOST_ALIASES }) as Record<string, unknown> };
+  } catch {
+    report(
+      "too-many-aliases",
+      0,
+      1,
+      `Aliases repeat values more than ${MOST_ALIASES} times, or one stands within itself; write the values out.`,
+    );
+    return null;
+  }
+}

@@ -1,0 +1,72 @@
+import { type Document, isCollection, isScalar, visit } from "yaml";
+import { explainYamlError } from "./explainYamlError.ts";
+
+/** Takes one problem with its offset in the YAML text. */
+export type ReportAt = (
+  code: string,
+  offset: number,
+  length: number,
+  message: string,
+  suggestion?: string,
+) => void;
+
+/**
+ * Reports what the parser found; true when the data cannot be trusted. Of the errors that disturb what
+ * follows only the first is told, because the others are mostly its echoes.
+ */
+export function reportYamlProblems(document: Document.Parsed, yaml: string, report: ReportAt): boolean {
+  let untrusted = false;
+  for (const problem of [...document.errors, ...document.warnings]) {
+    let offset = Math.min(problem.pos[0], yaml.length);
+    const found = (/^[^\s:,}\]]+/.exec(yaml.slice(offset, offset + 80)) ?? [""])[0];
+    const { code, message, suggestion, local } = explainYamlError(
+      problem.code,
+      problem.message,
+      lineAround(yaml, offset),
+      found,
+    );
+    if (!local && untrusted) continue;
+    if (!local) {
+      untrusted = true;
+      // An unclosed quotation mark or bracket is noticed far below; its opening is what the author must see.
+      offset = unclosedBefore(document, offset, problem.code) ?? offset;
+    }
+    report(code, offset, Math.max(1, found.length), message, suggestion);
+  }
+  if (untrusted) return true;
+  visit(document, {
+    Alias: (_key, alias) => {
+      if (alias.resolve(document) !== undefined) return;
+      const [from, to] = alias.range!;
+      report(
+        "broken-yaml",
+        from,
+        to - from,
+        "A value that begins with * is read as an alias, and none of this name exists; put the text in quotation marks.",
+      );
+      untrusted = true;
+    },
+  });
+  return untrusted;
+}
+
+function lineAround(yaml: string, offset: number): string {
+  const start = yaml.lastIndexOf("\n", offset - 1) + 1;
+  return (/^.*/.exec(yaml.slice(start)) ?? [""])[0];
+}
+
+/** Offset of the quotation mark or bracket that is still open at `offset`, if that is the complaint. */
+function unclosedBefore(document: Document.Parsed, offset: number, code: string): number | undefined {
+  if (code !== "MISSING_CHAR" && code !== "BAD_INDENT") return undefined;
+  let opening: number | undefined;
+  visit(document, {
+    Node: (_key, node) => {
+      const quoted = isScalar(node) && (node.type === "QUOTE_SINGLE" || node.type === "QUOTE_DOUBLE");
+      const bracketed = isCollection(node) && node.flow === true;
+      const range = node.range;
+      if ((quoted || bracketed) && range != null && range[0] < offset && range[1] >= offset)
+        opening = range[0];
+    },
+  });
+  return opening;
+}
