@@ -1,6 +1,6 @@
 import { escapeHtml } from "../quantity/escapeHtml.ts";
 import { labelHtml } from "../quantity/labelHtml.ts";
-import type { DerivationStep } from "./DerivationStep.ts";
+import type { DerivationKey, DerivationStep } from "./DerivationStep.ts";
 import { renderTex } from "./renderTex.ts";
 
 export interface DerivationOptions {
@@ -8,6 +8,8 @@ export interface DerivationOptions {
   readonly headingLevel?: 2 | 3 | 4 | 5 | 6;
   /** Begins every id, unique on the page; default `derivation`. */
   readonly idPrefix?: string;
+  /** Address of a register row relative to the page; undefined for rows without a place of their own. */
+  readonly rowHref?: (row: string) => string | undefined;
 }
 
 /** Steps as an ordered list with headings, sentences, formulae and the key of their symbols. */
@@ -20,7 +22,7 @@ export function renderDerivation(steps: readonly DerivationStep[], options: Deri
       `<h${headingLevel}>${escapeHtml(step.title)}</h${headingLevel}>`,
       `<p>${labelHtml(step.words)}</p>`,
       ...formula(step),
-      ...key(step),
+      ...key(step, options),
       "</li>",
     ].join("\n");
   });
@@ -36,12 +38,19 @@ function formula(step: DerivationStep): readonly string[] {
   ];
 }
 
-function key(step: DerivationStep): readonly string[] {
+function key(step: DerivationStep, options: DerivationOptions): readonly string[] {
   if (step.where.length === 0) return [];
   const rows = step.where.map(
-    ({ symbol, meaning }) => `<div><dt>${symbolHtml(symbol)}</dt><dd>${labelHtml(meaning)}</dd></div>`,
+    (entry) => `<div><dt>${symbolHtml(entry.symbol)}</dt><dd>${meaningHtml(entry, options)}</dd></div>`,
   );
   return [`<dl class="derivation-key">`, ...rows, "</dl>"];
+}
+
+function meaningHtml({ meaning, row }: DerivationKey, { rowHref }: DerivationOptions): string {
+  if (row === undefined) return labelHtml(meaning);
+  const href = rowHref?.(row);
+  const text = escapeHtml(row);
+  return href === undefined ? text : `<a href="${escapeHtml(href)}">${text}</a>`;
 }
 
 /** `u1` with its index lowered; anything else as it is. */

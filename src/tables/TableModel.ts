@@ -52,4 +52,8 @@ export interface Cell {
   readonly standing?: CellStanding;
   /** Address of the link on the text, relative to the page. */
   readonly href?: string;
+  /** Register row behind the value: the renderer links the text when it knows where the register stands. */
+  readonly registerRow?: string;
+  /** Citation keys in the text, likewise. */
+  readonly sourceKeys?: readonly string[];
 }

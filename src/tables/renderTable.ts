@@ -1,9 +1,9 @@
 import { escapeHtml } from "../quantity/escapeHtml.ts";
 import { labelHtml } from "../quantity/labelHtml.ts";
-import { STANDINGS, standingMark } from "./standingMark.ts";
+import { type CellLinks, cellHtml } from "./cellHtml.ts";
 import type { Cell, Column, Row, TableModel } from "./TableModel.ts";
 
-export interface TableOptions {
+export interface TableOptions extends CellLinks {
   /** Begins every id, unique on the page, e.g. the dossier's slug; default none. */
   readonly idPrefix?: string;
   /** Set before the caption: `Table 2.` */
@@ -20,7 +20,7 @@ export function renderTable(model: TableModel, options: TableOptions = {}): stri
   const number =
     options.number === undefined ? "" : `<span class="caption-number">${escapeHtml(options.number)}</span> `;
   const spoken = [options.number, model.caption].filter((part) => part !== undefined).join(" ");
-  const body = model.rows.map((row) => renderRow(row, model.columns, id));
+  const body = model.rows.map((row) => renderRow(row, model.columns, id, options));
   return [
     `<div class="table-scroll" role="region" tabindex="0" aria-label="${escapeHtml(spoken)}">`,
     `<table class="table table-${escapeHtml(model.id)}" id="${id}">`,
@@ -42,29 +42,20 @@ function heading(column: Column): string {
   return `<th scope="col" class="align-${column.align}">${escapeHtml(column.title)}${unit}${description}</th>`;
 }
 
-function renderRow(row: Row, columns: readonly Column[], tableId: string): string {
+function renderRow(row: Row, columns: readonly Column[], tableId: string, links: CellLinks): string {
   const id = row.id === undefined ? "" : ` id="${tableId}-${escapeHtml(row.id)}"`;
   const kind = row.kind === undefined ? "" : ` class="row-${row.kind}"`;
-  const cells = columns.map((column, index) => renderCell(row.cells[index] ?? { text: "" }, column));
+  const cells = columns.map((column, index) => renderCell(row.cells[index] ?? { text: "" }, column, links));
   return `<tr${id}${kind}>${cells.join("")}</tr>`;
 }
 
-function renderCell(cell: Cell, column: Column): string {
+function renderCell(cell: Cell, column: Column, links: CellLinks): string {
   const value = cell.sortValue === undefined ? "" : ` data-sort="${cell.sortValue}"`;
   const attributes = `class="align-${column.align}"${value}`;
-  const text = cell.markup === true ? labelHtml(cell.text) : escapeHtml(cell.text);
-  const linked = cell.href === undefined ? text : `<a href="${escapeHtml(cell.href)}">${text}</a>`;
-  const content = `${mark(cell)}${linked}`;
+  const content = cellHtml(cell, links);
   return column.rowHeader === true
     ? `<th scope="row" ${attributes}>${content}</th>`
     : `<td ${attributes}>${content}</td>`;
-}
-
-/** The word of the mark is left to the text where the text says it. */
-function mark(cell: Cell): string {
-  if (cell.standing === undefined) return "";
-  const said = cell.text.includes(STANDINGS[cell.standing].word);
-  return `${standingMark(cell.standing, said ? "none" : "spoken")}\u00a0`;
 }
 
 function notes(sentences: readonly string[]): readonly string[] {

@@ -20,7 +20,7 @@ export function differenceUncertainty(dossier: Dossier): DerivationStep {
     if (equilibrium.bySymmetry) return [];
     const name = texDifference(dossier, to.id);
     const result = `u(${name}) &= ${texEnergy(equilibrium.u_kJ_mol)}${KILOJOULE_PER_MOLE}`;
-    const terms = varianceTerms(dossier, from, to, equilibrium.u_kJ_mol);
+    const terms = varianceTerms(from, to, equilibrium.u_kJ_mol);
     if (terms === null) {
       hidden = true;
       return [result];
@@ -38,7 +38,11 @@ export function differenceUncertainty(dossier: Dossier): DerivationStep {
     );
     return [`u^2(${name}) &= ${first}`, ...more, result];
   });
-  const where: DerivationKey[] = [...indices].map(([row, index]) => ({ symbol: `u${index}`, meaning: row }));
+  const where: DerivationKey[] = [...indices].map(([row, index]) => ({
+    symbol: `u${index}`,
+    meaning: row,
+    row,
+  }));
   const cancelled = [...still].filter((row) => !indices.has(row)).sort();
   const one = cancelled.length === 1;
   return {
@@ -49,9 +53,7 @@ export function differenceUncertainty(dossier: Dossier): DerivationStep {
       (cancelled.length > 0
         ? ` With equal factors in both conformers ${cancelled.join(", ")} ${one ? "adds" : "add"} nothing.`
         : "") +
-      (hidden
-        ? " The shares of single values cannot be told apart in the record, so only the result is shown."
-        : ""),
+      (hidden ? " The record does not say how single values share in it, so only the result is shown." : ""),
     tex: texAligned(lines),
     where,
   };

@@ -1,7 +1,7 @@
 import { type NumberedContribution, numberContributions } from "../../derivation/numberContributions.ts";
 import { shownConformers } from "../../derivation/shownConformers.ts";
 import { shownNotice } from "../../derivation/shownNotice.ts";
-import type { Conformer, Dossier } from "../../dossier/Dossier.ts";
+import type { Conformer, Contribution, Dossier } from "../../dossier/Dossier.ts";
 import { formatTemperature } from "../../quantity/formatTemperature.ts";
 import { energyCell } from "../cells/energyCell.ts";
 import { energyColumn } from "../cells/energyColumn.ts";
@@ -57,12 +57,18 @@ function contributionRow(row: NumberedContribution, shown: readonly Conformer[])
       { text: contribution.label, markup: true },
       ...shown.map(({ id }) => (row.conformers.includes(id) ? value : NONE)),
       uncertaintyCell(contribution.u_kJ_mol),
-      { text: words, standing },
-      { text: contribution.source },
+      { text: words, standing, ...registerRow(contribution) },
+      { text: contribution.source, sourceKeys: contribution.sourceKeys },
       { text: temperature === null ? medium : `${medium}, ${formatTemperature(temperature)}` },
       { text: contribution.note ?? "" },
     ],
   };
+}
+
+/** The row that a published value was read from; stand-ins have no row to show. */
+function registerRow({ basis, terms }: Contribution): Pick<Cell, "registerRow"> {
+  const [term] = terms;
+  return basis === "published" && term !== undefined ? { registerRow: term.row } : {};
 }
 
 function results(dossier: Dossier, shown: readonly Conformer[]): readonly Row[] {
@@ -71,10 +77,10 @@ function results(dossier: Dossier, shown: readonly Conformer[]): readonly Row[] 
   const equilibrium = (id: string) => dossier.equilibria.find(({ to }) => to === id);
   const row = (title: string, cells: readonly Cell[]): Row => ({
     kind: "result",
-    cells: [NONE, { text: title }, ...cells],
+    cells: [{ text: "" }, { text: title }, ...cells],
   });
-  const others = (cell: (conformer: Conformer) => Cell) =>
-    shown.map((conformer) => (conformer === first ? NONE : cell(conformer)));
+  const others = (reference: Cell, cell: (conformer: Conformer) => Cell) =>
+    shown.map((conformer) => (conformer === first ? reference : cell(conformer)));
   return [
     row(
       "Sum",
@@ -82,11 +88,13 @@ function results(dossier: Dossier, shown: readonly Conformer[]): readonly Row[] 
     ),
     row(
       `\u0394G\u00b0 relative to ${first.id}`,
-      others((conformer) => difference(conformer, equilibrium(conformer.id)?.bySymmetry === true)),
+      others({ text: "reference" }, (conformer) =>
+        difference(conformer, equilibrium(conformer.id)?.bySymmetry === true),
+      ),
     ),
     row(
       "u(\u0394G\u00b0)",
-      others(({ u_kJ_mol }) => uncertaintyCell(u_kJ_mol)),
+      others(NONE, ({ u_kJ_mol }) => uncertaintyCell(u_kJ_mol)),
     ),
     {
       ...row(

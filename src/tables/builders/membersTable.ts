@@ -1,7 +1,7 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
 import { populationCell } from "../cells/populationCell.ts";
 import { populationColumn } from "../cells/populationColumn.ts";
-import type { TableModel } from "../TableModel.ts";
+import type { Row, TableModel } from "../TableModel.ts";
 
 /** What each stereoisomer would give where the author left stereochemistry open. */
 export function membersTable(dossier: Dossier): TableModel {
@@ -14,14 +14,16 @@ export function membersTable(dossier: Dossier): TableModel {
       populationColumn("population", "Population", "with 95\u00a0% interval"),
       { key: "smiles", title: "Canonical SMILES", align: "left" },
     ],
-    rows: dossier.members.map((member) => ({
-      cells: [
-        { text: member.description },
-        { text: member.majorLabel, markup: true },
-        populationCell(member.population, member.population95),
-        { text: member.canonicalSmiles },
-      ],
-    })),
-    notes: [],
+    rows: dossier.members.map(
+      (member): Row => ({
+        cells: [
+          { text: member.description },
+          { text: member.majorLabel, markup: true },
+          populationCell(member.population, member.population95),
+          { text: member.canonicalSmiles },
+        ],
+      }),
+    ),
+    notes: dossier.members.length > 0 ? [] : ["No stereochemistry is left open, so no members are listed."],
   };
 }

@@ -36,7 +36,7 @@ export function temperatureTable(dossier: Dossier): TableModel {
       ],
     })),
     notes: [
-      "Values far from the temperature of the sources rest on extrapolation; the intervals widen accordingly only where the register says how.",
+      "Away from the temperature of a source the published entropy carries its value; where none is published it is taken as zero with an uncertainty, so the intervals widen.",
       ...(notice === "" ? [] : [notice]),
     ],
   };
