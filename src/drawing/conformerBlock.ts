@@ -1,0 +1,115 @@
+import type { Conformer, Dossier } from "../dossier/Dossier.ts";
+import { formatPopulation } from "../quantity/formatPopulation.ts";
+import { boundsOf } from "./boundsOf.ts";
+import { chairItems } from "./chairItems.ts";
+import { conformerLabelRuns } from "./conformerLabelRuns.ts";
+import { labelRuns } from "./labelRuns.ts";
+import { layChair } from "./layChair.ts";
+import { CAP_HEIGHT, LINE_HEIGHT, MAXIMUM_WIDTH, SMALL_SIZE, TEXT_SIZE } from "./measures.ts";
+import { moveItems } from "./moveItems.ts";
+import { placeText } from "./placeText.ts";
+import type { Camera } from "./projectPoint.ts";
+import type { Box, Part, SceneItem, SceneText, TextRun } from "./Scene.ts";
+import { viewChair } from "./viewChair.ts";
+import { wrapLabel } from "./wrapLabel.ts";
+
+/** A conformer ready to be set into a figure: chairs centred on the origin, words to be set beneath. */
+export interface ConformerBlock {
+  readonly chairs: readonly SceneItem[];
+  readonly chairBounds: Box;
+  /** Lines of text, each centred on the origin, the first with its capitals' top at y = 0. */
+  readonly words: readonly SceneText[];
+  readonly wordBounds: Box;
+}
+
+export interface BlockOptions {
+  readonly hydrogens: boolean;
+  readonly locants: boolean;
+}
+
+/** Between the chairs of two rings of one conformer. */
+const RING_GAP = 20;
+
+/** Draws the chair of every ring of a conformer, side by side where there is room, with its label and population. */
+export function conformerBlock(
+  dossier: Dossier,
+  conformer: Conformer,
+  cameras: readonly Camera[],
+  options: BlockOptions,
+): ConformerBlock {
+  const several = dossier.rings.length > 1;
+  const chairs = dossier.rings.map((ring, index) => {
+    const view = viewChair(dossier, conformer, ring, cameras[index]!, options.hydrogens);
+    const items = chairItems(layChair(view), options);
+    return several ? [...items, ringCaption(items, index, view.group)] : items;
+  });
+  const items = sideBySide(chairs);
+  const words = wordsOf(dossier, conformer);
+  return { chairs: items, chairBounds: boundsOf(items)!, words, wordBounds: boundsOf(words)! };
+}
+
+function ringCaption(items: readonly SceneItem[], index: number, group: string): SceneText {
+  const below = boundsOf(items)!.bottom;
+  return placeText(labelRuns(`ring ${index + 1}`, { size: SMALL_SIZE, ink: "muted" }), {
+    at: { x: 0, y: below + 6 + CAP_HEIGHT * SMALL_SIZE },
+    anchor: "middle",
+    part: "ring caption",
+    group,
+  });
+}
+
+/** Rings in a row about the origin; a ring that would make the row too wide begins the next row. */
+function sideBySide(chairs: readonly (readonly SceneItem[])[]): readonly SceneItem[] {
+  const rows: SceneItem[][] = [];
+  let width = 0;
+  for (const chair of chairs) {
+    const box = boundsOf(chair)!;
+    const row = rows.at(-1);
+    const needed = width + RING_GAP + box.right - box.left;
+    if (row === undefined || needed > MAXIMUM_WIDTH) {
+      rows.push([...moveItems(chair, -box.left, 0)]);
+      width = box.right - box.left;
+    } else {
+      row.push(...moveItems(chair, width + RING_GAP - box.left, 0));
+      width = needed;
+    }
+  }
+  let below = 0;
+  return rows.flatMap((row, index) => {
+    const box = boundsOf(row)!;
+    const down = index === 0 ? 0 : below + RING_GAP - box.top;
+    below = down + box.bottom;
+    // A single ring keeps its centre on the origin, so that the two chairs of a flip stand in line.
+    const across = chairs.length === 1 ? boundsOf(chairs[0]!)!.left : -(box.left + box.right) / 2;
+    return moveItems(row, across, down);
+  });
+}
+
+function wordsOf(dossier: Dossier, conformer: Conformer): readonly SceneText[] {
+  const population = formatPopulation(conformer.population, conformer.population95);
+  const name: TextRun[] = [
+    ...labelRuns(`${conformer.id}\u2002`, { size: TEXT_SIZE, ink: "ink", bold: true }),
+  ];
+  const lines = wrapLabel(conformer.label, TEXT_SIZE, Math.max(150, 150 * dossier.rings.length));
+  const rows: { readonly runs: readonly TextRun[]; readonly part: Part }[] = [
+    { runs: join(name, conformerLabelRuns(lines[0] ?? "", TEXT_SIZE)), part: "conformer label" },
+    ...lines
+      .slice(1)
+      .map((line) => ({ runs: conformerLabelRuns(line, TEXT_SIZE), part: "conformer label" as const })),
+    { runs: labelRuns(population, { size: TEXT_SIZE, ink: "ink" }), part: "population" },
+  ];
+  return rows.map(({ runs, part }, index) =>
+    placeText(runs, {
+      at: { x: 0, y: CAP_HEIGHT * TEXT_SIZE + index * LINE_HEIGHT * TEXT_SIZE },
+      anchor: "middle",
+      part,
+      group: conformer.id,
+    }),
+  );
+}
+
+function join(first: readonly TextRun[], second: readonly TextRun[]): readonly TextRun[] {
+  const last = first.at(-1);
+  const shift = last === undefined ? 0 : last.x + last.width;
+  return [...first, ...second.map((run) => ({ ...run, x: run.x + shift }))];
+}

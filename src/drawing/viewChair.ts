@@ -1,0 +1,99 @@
+import type { Conformer, Dossier, Orientation, Ring } from "../dossier/Dossier.ts";
+import type { Branch, ChairView, Vertex, VertexLetters } from "./ChairView.ts";
+import { type Camera, projectPoint } from "./projectPoint.ts";
+
+/** A bond this steep, as a share of its length along the ring's axis, is an axial one. */
+const AXIAL_SLOPE = 0.7;
+
+/**
+ * Looks at one ring of a conformer through a camera. Coordinates are taken relative to the ring's centre, so
+ * that rings which share a frame, or do not, are seen alike.
+ *
+ * @param hydrogens - also draw the hydrogen of ring carbons that carry a group.
+ */
+export function viewChair(
+  dossier: Dossier,
+  conformer: Conformer,
+  ring: Ring,
+  camera: Camera,
+  hydrogens: boolean,
+): ChairView {
+  const placed = conformer.geometry.atoms;
+  const ringAtoms = ring.atoms.map((atom) => {
+    const found = placed.find((each) => each.atom === atom && each.parent === null);
+    if (found === undefined)
+      throw new RangeError(`conformer ${conformer.id} has no coordinates for ring atom ${atom}`);
+    return found;
+  });
+  const centre = (axis: "x" | "y" | "z") =>
+    ringAtoms.reduce((sum, atom) => sum + atom[axis], 0) / ringAtoms.length;
+  const [x, y, z] = [centre("x"), centre("y"), centre("z")];
+  const see = (atom: (typeof placed)[number]) =>
+    projectPoint(camera, { x: atom.x - x, y: atom.y - y, z: atom.z - z });
+
+  const vertices = ring.atoms.map(
+    (atom, index): Vertex => ({
+      atom,
+      locant: ring.locants[index] ?? "",
+      at: see(ringAtoms[index]!),
+      letters: lettersOf(dossier, atom),
+    }),
+  );
+  const groups = ring.substituents.map((substituent): Branch => {
+    const found = placed.find(
+      (each) => each.atom === substituent.atom && each.parent === substituent.ringAtom,
+    );
+    const position = conformer.positions.find(
+      (each) => each.substituent === substituent.atom && each.ringAtom === substituent.ringAtom,
+    );
+    if (found === undefined || position === undefined) {
+      throw new RangeError(
+        `conformer ${conformer.id} has no place for the group at atom ${substituent.atom}`,
+      );
+    }
+    return {
+      vertex: ring.atoms.indexOf(substituent.ringAtom),
+      atom: substituent.atom,
+      orientation: position.orientation,
+      end: see(found),
+      label: substituent.label,
+      labelReversed: substituent.labelReversed,
+    };
+  });
+  const carriers = new Set(groups.map((group) => group.vertex));
+  const drawn = placed.flatMap((atom): Branch[] => {
+    const vertex = ring.atoms.indexOf(atom.parent ?? -1);
+    if (!hydrogens || atom.element !== "H" || atom.atom !== null || !carriers.has(vertex)) return [];
+    if (vertices[vertex]!.letters !== null) return [];
+    const from = ringAtoms[vertex]!;
+    const rise = Math.abs(atom.z - from.z) / Math.hypot(atom.x - from.x, atom.y - from.y, atom.z - from.z);
+    const orientation: Orientation = rise > AXIAL_SLOPE ? "axial" : "equatorial";
+    return [{ vertex, atom: null, orientation, end: see(atom), label: "H", labelReversed: "H" }];
+  });
+  return {
+    group: `${conformer.id}/${ring.index}`,
+    vertices,
+    branches: [...groups, ...drawn],
+    front: frontBond(vertices),
+  };
+}
+
+function lettersOf(dossier: Dossier, atom: number): VertexLetters | null {
+  const { element, charge, isotope, hydrogens } = dossier.structure.atoms[atom]!;
+  if (element === "C" && charge === 0 && isotope === 0) return null;
+  const count = element === "C" ? 0 : hydrogens;
+  const size = Math.abs(charge) > 1 ? String(Math.abs(charge)) : "";
+  return {
+    element: isotope === 0 ? element : `^${isotope}${element}`,
+    hydrogens: count === 0 ? "" : count === 1 ? "H" : `H_${count}`,
+    charge: charge === 0 ? "" : `^${size}${charge > 0 ? "+" : "-"}`,
+  };
+}
+
+function frontBond(vertices: readonly Vertex[]): number {
+  const depth = (index: number) =>
+    vertices[index]!.at.depth + vertices[(index + 1) % vertices.length]!.at.depth;
+  let front = 0;
+  for (let index = 1; index < vertices.length; index++) if (depth(index) > depth(front) + 1e-6) front = index;
+  return front;
+}
