@@ -19,7 +19,8 @@ export interface ContentFolder {
  * folder are refused, so that a repository cannot pull foreign files into a site. Bytes are read, never run.
  */
 export async function readContentFolder(folder: string): Promise<ContentFolder> {
-  const root = await realpath(folder);
+  const root = await realpath(folder).catch(() => null);
+  if (root === null) return { files: [], attached: [], problems: [missingFolder(folder)] };
   const files: ContentFile[] = [];
   const attached: AttachedFile[] = [];
   const problems: Diagnostic[] = [];
@@ -86,6 +87,15 @@ export async function readContentFolder(folder: string): Promise<ContentFolder> 
 
   await visit("");
   return { files, attached, problems };
+}
+
+function missingFolder(folder: string): Diagnostic {
+  return {
+    code: "missing-content-folder",
+    severity: "error",
+    place: { file: relative(process.cwd(), folder) || ".", line: 1, column: 1 },
+    message: "There is no such folder; it should hold index.md and series/.",
+  };
 }
 
 /** The text, or the place of the first byte that is not UTF-8. */

@@ -97,7 +97,7 @@ describe("bench notation written as SMILES", () => {
     );
   });
 
-  it("gives the CIP descriptors that cis and trans have (common practice; r and s after IUPAC 2013 P-93.5.2)", () => {
+  it("gives the CIP descriptors that cis and trans have (common practice)", () => {
     const both = (locant: number, face: "up" | "down") =>
       at(bench(cyclohexane, { 1: { up: Me }, [locant]: { [face]: Me } }), 1, locant);
     expect(both(4, "up")).toEqual(["s", "s"]);

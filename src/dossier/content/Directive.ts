@@ -4,6 +4,8 @@ export interface Directive {
   readonly kind: string;
   readonly name: string;
   readonly options: Readonly<Record<string, string>>;
+  /** What stands in the braces and is not `key=value`; empty when all of it was understood. */
+  readonly unread: string;
   /** `block` for two colons on a line of its own, `inline` for one colon. */
   readonly form: "block" | "inline";
   /** True for a block directive with nothing else on its line. */

@@ -102,6 +102,12 @@ function checkDirective(directive: Directive, page: PageKind, place: Place): rea
   if (form === "block" && !directive.alone) {
     return report("misplaced-directive", `A ${known} must stand on a line of its own.`);
   }
+  if (directive.unread !== "") {
+    return report(
+      "broken-directive",
+      `${quote(directive.unread)} is not an option; options are written {key=value}.`,
+    );
+  }
   const options = DIRECTIVE_OPTIONS[`${known}/${name}`] ?? [];
   return Object.keys(directive.options)
     .filter((option) => !options.includes(option))

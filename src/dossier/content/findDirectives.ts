@@ -19,6 +19,7 @@ export function findDirectives(markdown: string, firstLine = 1): readonly Direct
           kind: kind!,
           name: name!.trim(),
           options: readOptions(options ?? ""),
+          unread: (options ?? "").replace(OPTION, "").trim(),
           form: colons === "::" ? "block" : "inline",
           alone: line.trim() === whole && /^ {0,3}\S/.test(line),
           line: firstLine + index,

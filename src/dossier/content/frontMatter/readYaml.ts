@@ -45,7 +45,7 @@ export function readYaml(
       "too-many-aliases",
       0,
       1,
-      `Aliases repeat values more than ${MOST_ALIASES} times, or one stands within itself; write the values out.`,
+      `Aliases repeat values more than ${MOST_ALIASES} times; write the values out.`,
     );
     return null;
   }

@@ -30,19 +30,24 @@ export function reportYamlProblems(document: Document.Parsed, yaml: string, repo
       untrusted = true;
       // An unclosed quotation mark or bracket is noticed far below; its opening is what the author must see.
       offset = unclosedBefore(document, offset, problem.code) ?? offset;
+      // How deep the parser gets depends on the machine, so the place must not.
+      if (problem.code === "RESOURCE_EXHAUSTION") offset = 0;
     }
     report(code, offset, Math.max(1, found.length), message, suggestion);
   }
   if (untrusted) return true;
   visit(document, {
-    Alias: (_key, alias) => {
-      if (alias.resolve(document) !== undefined) return;
+    Alias: (_key, alias, ancestors) => {
+      const named = alias.resolve(document);
+      if (named !== undefined && !ancestors.includes(named)) return;
       const [from, to] = alias.range!;
       report(
         "broken-yaml",
         from,
         to - from,
-        "A value that begins with * is read as an alias, and none of this name exists; put the text in quotation marks.",
+        named === undefined
+          ? "A value that begins with * is read as an alias, and none of this name exists; put the text in quotation marks."
+          : "This alias stands within the value that it names.",
       );
       untrusted = true;
     },

@@ -13,6 +13,7 @@ export function readCode(found: unknown): Reading<string> {
   if (SAFE.test(text.value) && text.value.length <= LONGEST) return text;
   const mended = text.value
     .normalize("NFKD")
+    .replace(/\p{M}/gu, "")
     .replace(/[^A-Za-z0-9._-]+/g, "-")
     .replace(/^[^A-Za-z0-9]+|[^A-Za-z0-9]+$/g, "")
     .slice(0, LONGEST);
