@@ -8,10 +8,10 @@ export interface Run {
 }
 
 /**
- * Digits after `_`, digits and a charge sign after `^`, and letters between two `*`.
+ * Digits after `_`, digits and a charge sign after `^`, and letters, digits or hyphens between two `*`.
  * Anything else, such as a lone `_` or `*`, is ordinary text: a label is never an error.
  */
-const MARK = /_(\d+)|\^(\d*[+\u2212-]|\d+)|\*([^*_^]+)\*/g;
+const MARK = /_(\d+)|\^(\d*[+\u2212-]|\d+)|\*([\p{L}\p{N}-]+)\*/gu;
 
 /**
  * Splits the markup of a chemical label into runs: `CO_2Me`, `NH_3^+`, `*t*-Bu`.

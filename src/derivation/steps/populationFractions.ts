@@ -8,6 +8,9 @@ import { texFraction } from "../texFraction.ts";
 import { texSignificant } from "../texSignificant.ts";
 import { texSum } from "../texSum.ts";
 
+/** One digit more than the constants, so that the shares follow from the printed sum. */
+const TOTAL_DIGITS = 4;
+
 /** Share of each conformer, from the constants. */
 export function populationFractions(dossier: Dossier): DerivationStep {
   const two = dossier.conformers.length === 2;
@@ -49,10 +52,10 @@ function manyStates(dossier: Dossier): readonly string[] {
   return [
     `Q &= \\sum_j K_j = ${first}`,
     ...more,
-    `&= ${texSignificant(total)}`,
+    `&= ${texSignificant(total, TOTAL_DIGITS)}`,
     ...shown.map(
       ({ id, population }, index) =>
-        `p(${texConformer(id)}) &= \\frac{${written(constants[index] ?? 1)}}{${texSignificant(total)}} = ${texFraction(population)}`,
+        `p(${texConformer(id)}) &= \\frac{${written(constants[index] ?? 1)}}{${texSignificant(total, TOTAL_DIGITS)}} = ${texFraction(population)}`,
     ),
   ];
 }
