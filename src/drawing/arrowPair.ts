@@ -2,7 +2,7 @@ import { BOND_STROKE } from "./measures.ts";
 import type { Part, Point, SceneItem } from "./Scene.ts";
 
 /** Length of the longer arrow, px, and the least share of it that the shorter one keeps. */
-export const ARROW_LENGTH = 54;
+export const ARROW_LENGTH = 50;
 const SHORTEST = 0.4;
 /** |log10 K| from which the shorter arrow shrinks no more. */
 const CLAMP = 2;

@@ -1,10 +1,13 @@
 import { labelText } from "../quantity/labelText.ts";
 import type { Branch, Vertex } from "./ChairView.ts";
+import { clipSegment } from "./clipSegment.ts";
+import { growBox } from "./growBox.ts";
 import type { LabelChoice } from "./LabelSlot.ts";
 import { labelRuns } from "./labelRuns.ts";
-import { CAP_HEIGHT, LABEL_SIZE } from "./measures.ts";
+import { BOND, CAP_HEIGHT, LABEL_GAP, LABEL_SIZE } from "./measures.ts";
 import { placeText } from "./placeText.ts";
-import type { SceneText } from "./Scene.ts";
+import { runBoxes } from "./runBoxes.ts";
+import type { Point, SceneText } from "./Scene.ts";
 import { textWidth } from "./textWidth.ts";
 
 /** Lengths at which a bond may be drawn when its true end is crowded. */
@@ -16,6 +19,9 @@ const STEEP = 0.35;
 const SHALLOW = 0.8;
 /** Half of a usual letter: a label beside a shallow bond begins this far before the attached atom's place. */
 const HALF_LETTER = 0.32 * LABEL_SIZE;
+/** A bond of which less than this is left between ring atom and letters, px, is too short to show its direction. */
+const SHORTEST_STUB = 0.36 * BOND;
+const STUB_COST = 1.2;
 
 /**
  * Ways to label a group: reading to the right from the attached atom, or, reversed, to the left up to it, with
@@ -37,11 +43,17 @@ export function branchChoices(vertex: Vertex, branch: Branch, group: string): re
           boxes: [text.box],
           core: text.box,
           bond: { from: vertex.at, to },
-          cost: turn + STRETCH_COST * (stretch - 1),
+          cost: turn + STRETCH_COST * (stretch - 1) + stubCost(vertex, to, text),
         },
       ];
     }),
   );
+}
+
+function stubCost(vertex: Vertex, to: Point, text: SceneText): number {
+  const inside = runBoxes(text).map((box) => clipSegment(vertex.at, to, growBox(box, LABEL_GAP))?.[0] ?? 1);
+  const stub = Math.min(...inside) * Math.hypot(to.x - vertex.at.x, to.y - vertex.at.y);
+  return STUB_COST * Math.max(0, SHORTEST_STUB - stub);
 }
 
 function setLabel(

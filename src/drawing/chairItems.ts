@@ -31,9 +31,10 @@ export function chairItems(laid: LaidChair, options: { readonly locants: boolean
   });
   lines.sort((a, b) => middleDepth(a) - middleDepth(b));
 
-  const cues = orientationCues(laid, { lines, boxes: texts.map((text) => text.box) });
+  const boxes = texts.map((text) => text.box);
+  const cues = orientationCues(laid, { lines, boxes, small: [] });
   const locants = options.locants
-    ? ringLocants(laid, { lines, boxes: [...texts, ...cues].map((text) => text.box) })
+    ? ringLocants(laid, { lines, boxes, small: cues.map((cue) => cue.box) })
     : [];
   return [...lines, ...texts, ...cues, ...locants];
 }

@@ -1,6 +1,6 @@
-import type { Conformer, Dossier, Ring } from "../dossier/Dossier.ts";
+import type { Dossier, Ring } from "../dossier/Dossier.ts";
 import { layChair } from "./layChair.ts";
-import type { Camera } from "./projectPoint.ts";
+import type { RingCamera } from "./RingCamera.ts";
 import { viewChair } from "./viewChair.ts";
 
 /** Degrees above the mean plane that give the drawing chemists expect. */
@@ -12,26 +12,23 @@ const AZIMUTH_COST = 0.8;
 const JUDGED = 8;
 
 /**
- * Chooses one camera for each ring, shared by all conformers: of the six places in which the ring can be turned
- * and a few azimuths, the one with the fewest crowded labels and coincident bonds over all of them together.
+ * Chooses one camera for each ring, shared by all conformers: of the six ring atoms that can stand at the right
+ * end and a few azimuths, the choice with the fewest crowded labels and coincident bonds over all of them together.
  */
-export function chooseCameras(dossier: Dossier, hydrogens: boolean): readonly Camera[] {
+export function chooseCameras(dossier: Dossier, hydrogens: boolean): readonly RingCamera[] {
   const judged = dossier.conformers.slice(0, JUDGED);
   return dossier.rings.map((ring) => {
-    let best: { readonly camera: Camera; readonly cost: number } | null = null;
+    let best: { readonly camera: RingCamera; readonly cost: number } | null = null;
     for (const azimuth of AZIMUTHS) {
-      for (let place = 0; place < 6; place++) {
-        const camera: Camera = {
-          turn: azimuth + 60 * place - firstAngle(judged[0]!, ring),
-          elevation: ELEVATION,
-        };
+      for (let rightEnd = 0; rightEnd < 6; rightEnd++) {
+        const camera: RingCamera = { rightEnd, azimuth, elevation: ELEVATION };
         const laid = judged.map((conformer) =>
           layChair(viewChair(dossier, conformer, ring, camera, hydrogens)),
         );
         const cost =
           laid.reduce((sum, each) => sum + each.cost, 0) / laid.length +
           AZIMUTH_COST * (azimuth - AZIMUTHS[0]!) +
-          customCost(dossier, ring, place);
+          customCost(dossier, ring, rightEnd);
         if (best === null || cost < best.cost - 1e-6) best = { camera, cost };
       }
     }
@@ -39,28 +36,18 @@ export function chooseCameras(dossier: Dossier, hydrogens: boolean): readonly Ca
   });
 }
 
-/** Direction of the first ring atom in the file's coordinates, degrees. */
-function firstAngle(conformer: Conformer, ring: Ring): number {
-  const atoms = conformer.geometry.atoms.filter(
-    (atom) => atom.parent === null && ring.atoms.includes(atom.atom ?? -1),
-  );
-  const centre = (axis: "x" | "y") => atoms.reduce((sum, atom) => sum + atom[axis], 0) / atoms.length;
-  const first = atoms.find((atom) => atom.atom === ring.atoms[0])!;
-  return (Math.atan2(first.y - centre("y"), first.x - centre("x")) * 180) / Math.PI;
-}
-
 /**
  * Where the trade likes to see position 1: at the right end, then at the left one; a ring oxygen or sulfur at the
  * back to the right, as in drawings of pyranoses.
  */
-function customCost(dossier: Dossier, ring: Ring, place: number): number {
+function customCost(dossier: Dossier, ring: Ring, rightEnd: number): number {
   const one = Math.max(
     0,
     ring.locants.findIndex((locant) => locant.replace(/′+$/, "") === "1"),
   );
   const element = dossier.structure.atoms[ring.atoms[one]!]!.element;
-  // The list runs clockwise from above: each step along it is a step of −60°.
-  const spot = (((place - one) % 6) + 6) % 6;
+  // The list runs clockwise seen from above, so that atom `rightEnd − 1` stands one step counter-clockwise of the right end.
+  const spot = (((rightEnd - one) % 6) + 6) % 6;
   if (element === "O" || element === "S") return spot === 1 ? 0 : spot === 0 || spot === 3 ? 3 : 4;
   return spot === 0 ? 0 : spot === 3 ? 2 : 4;
 }

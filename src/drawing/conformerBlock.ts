@@ -8,7 +8,7 @@ import { layChair } from "./layChair.ts";
 import { CAP_HEIGHT, LINE_HEIGHT, MAXIMUM_WIDTH, SMALL_SIZE, TEXT_SIZE } from "./measures.ts";
 import { moveItems } from "./moveItems.ts";
 import { placeText } from "./placeText.ts";
-import type { Camera } from "./projectPoint.ts";
+import type { RingCamera } from "./RingCamera.ts";
 import type { Box, Part, SceneItem, SceneText, TextRun } from "./Scene.ts";
 import { viewChair } from "./viewChair.ts";
 import { wrapLabel } from "./wrapLabel.ts";
@@ -34,54 +34,58 @@ const RING_GAP = 20;
 export function conformerBlock(
   dossier: Dossier,
   conformer: Conformer,
-  cameras: readonly Camera[],
+  cameras: readonly RingCamera[],
   options: BlockOptions,
 ): ConformerBlock {
-  const several = dossier.rings.length > 1;
-  const chairs = dossier.rings.map((ring, index) => {
+  const chairs = dossier.rings.map((ring, index): RingDrawing => {
     const view = viewChair(dossier, conformer, ring, cameras[index]!, options.hydrogens);
-    const items = chairItems(layChair(view), options);
-    return several ? [...items, ringCaption(items, index, view.group)] : items;
+    return { items: chairItems(layChair(view), options), number: index + 1, group: view.group };
   });
   const items = sideBySide(chairs);
   const words = wordsOf(dossier, conformer);
   return { chairs: items, chairBounds: boundsOf(items)!, words, wordBounds: boundsOf(words)! };
 }
 
-function ringCaption(items: readonly SceneItem[], index: number, group: string): SceneText {
-  const below = boundsOf(items)!.bottom;
-  return placeText(labelRuns(`ring ${index + 1}`, { size: SMALL_SIZE, ink: "muted" }), {
-    at: { x: 0, y: below + 6 + CAP_HEIGHT * SMALL_SIZE },
-    anchor: "middle",
-    part: "ring caption",
-    group,
-  });
+interface RingDrawing {
+  readonly items: readonly SceneItem[];
+  readonly number: number;
+  readonly group: string;
 }
 
 /** Rings in a row about the origin; a ring that would make the row too wide begins the next row. */
-function sideBySide(chairs: readonly (readonly SceneItem[])[]): readonly SceneItem[] {
-  const rows: SceneItem[][] = [];
-  let width = 0;
+function sideBySide(chairs: readonly RingDrawing[]): readonly SceneItem[] {
+  const [only] = chairs;
+  // A single ring keeps its centre on the origin, so that the two chairs of a flip stand in line.
+  if (chairs.length === 1 && only !== undefined) return only.items;
+  const rows: { readonly chairs: (RingDrawing & { readonly centre: number })[]; width: number }[] = [];
   for (const chair of chairs) {
-    const box = boundsOf(chair)!;
-    const row = rows.at(-1);
-    const needed = width + RING_GAP + box.right - box.left;
-    if (row === undefined || needed > MAXIMUM_WIDTH) {
-      rows.push([...moveItems(chair, -box.left, 0)]);
-      width = box.right - box.left;
-    } else {
-      row.push(...moveItems(chair, width + RING_GAP - box.left, 0));
-      width = needed;
+    const box = boundsOf(chair.items)!;
+    const width = box.right - box.left;
+    let row = rows.at(-1);
+    if (row === undefined || row.width + RING_GAP + width > MAXIMUM_WIDTH) {
+      row = { chairs: [], width: -RING_GAP };
+      rows.push(row);
     }
+    row.chairs.push({ ...chair, centre: row.width + RING_GAP - box.left });
+    row.width += RING_GAP + width;
   }
   let below = 0;
   return rows.flatMap((row, index) => {
-    const box = boundsOf(row)!;
+    const items = row.chairs.flatMap((chair) => moveItems(chair.items, chair.centre, 0));
+    const box = boundsOf(items)!;
+    const captions = row.chairs.map((chair) => ringCaption(chair, box.bottom));
     const down = index === 0 ? 0 : below + RING_GAP - box.top;
-    below = down + box.bottom;
-    // A single ring keeps its centre on the origin, so that the two chairs of a flip stand in line.
-    const across = chairs.length === 1 ? boundsOf(chairs[0]!)!.left : -(box.left + box.right) / 2;
-    return moveItems(row, across, down);
+    below = down + boundsOf(captions)!.bottom;
+    return moveItems([...items, ...captions], -(box.left + box.right) / 2, down);
+  });
+}
+
+function ringCaption(chair: { number: number; group: string; centre: number }, below: number): SceneText {
+  return placeText(labelRuns(`ring ${chair.number}`, { size: SMALL_SIZE, ink: "muted" }), {
+    at: { x: chair.centre, y: below + 6 + CAP_HEIGHT * SMALL_SIZE },
+    anchor: "middle",
+    part: "ring caption",
+    group: chair.group,
   });
 }
 

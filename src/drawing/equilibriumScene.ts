@@ -13,7 +13,7 @@ import { placeText } from "./placeText.ts";
 import type { Box, Point, Scene, SceneItem } from "./Scene.ts";
 import { wrapMarkup } from "./wrapMarkup.ts";
 
-const ARROW_SPACE = ARROW_LENGTH + 24;
+const ARROW_SPACE = ARROW_LENGTH + 22;
 const ROW_GAP = 26;
 const WORD_GAP = 14;
 const COLUMN_GAP = 28;

@@ -5,6 +5,8 @@ import { segmentBoxGap } from "./segmentBoxGap.ts";
 
 /** Free space wanted around small letters, px. */
 const WANTED = 2.5;
+/** Between two small letters, which would otherwise read as one word. */
+const WANTED_BETWEEN = 6;
 const TOUCHING = 60;
 
 /** The cheapest of several places for a small text: its own cost and the price of crowding what stands there. */
@@ -14,9 +16,10 @@ export function freePlace(
 ): SceneText {
   const costs = places.map(({ text, cost }) => {
     let sum = cost;
-    for (const box of ground.boxes) sum += price(boxGap(text.box, box));
+    for (const box of ground.boxes) sum += price(boxGap(text.box, box), WANTED);
+    for (const box of ground.small) sum += price(boxGap(text.box, box), WANTED_BETWEEN);
     for (const { from, to, width } of ground.lines) {
-      sum += price(segmentBoxGap(from, to, text.box) - width / 2);
+      sum += price(segmentBoxGap(from, to, text.box) - width / 2, WANTED);
     }
     return sum;
   });
@@ -25,7 +28,7 @@ export function freePlace(
   return places[best]!.text;
 }
 
-function price(gap: number): number {
+function price(gap: number, wanted: number): number {
   if (gap < 0.4) return TOUCHING - gap;
-  return gap < WANTED ? 6 * (WANTED - gap) : 0;
+  return gap < wanted ? (15 * (wanted - gap)) / wanted : 0;
 }

@@ -3,7 +3,7 @@
  * With these a figure of full width (`MAXIMUM_WIDTH`) still has 8 px type on a 320 px screen and 6 pt type when
  * printed 80 mm wide.
  */
-export const BOND = 36;
+export const BOND = 42;
 
 /** Pixels per ångström: the C–C bond of cyclohexane, 1.536 Å, is one bond length. */
 export const SCALE = BOND / 1.536;
@@ -16,11 +16,11 @@ export const HAIRLINE = 0.75;
 /** Free space on either side of a nearer bond where it crosses a farther one. */
 export const CROSSING_GAP = 0.05 * BOND;
 /** Between the end of a bond and the letters it points at. */
-export const LABEL_GAP = 0.1 * BOND;
+export const LABEL_GAP = 0.08 * BOND;
 
-/** Group labels: capitals are 0.66 of the type size high, 0.30 of a bond. */
+/** Group labels: capitals are 0.66 of the type size high, a quarter of a bond. */
 export const LABEL_SIZE = 16;
-export const SMALL_SIZE = 12;
+export const SMALL_SIZE = 13;
 export const TEXT_SIZE = 14;
 
 /** Heights of the letters as shares of the type size. */
@@ -32,6 +32,6 @@ export const LINE_HEIGHT = 1.3;
 /** Free margin around a figure. */
 export const MARGIN = 6;
 /** Figures are broken into rows rather than drawn wider than this. */
-export const MAXIMUM_WIDTH = 440;
+export const MAXIMUM_WIDTH = 480;
 /** More conformers than this are told in words. */
 export const MOST_DRAWN = 8;

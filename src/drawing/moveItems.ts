@@ -10,15 +10,9 @@ export function moveItems(items: readonly SceneItem[], dx: number, dy: number): 
     bottom: bottom + dy,
   });
   return items.map((item): SceneItem => {
-    switch (item.kind) {
-      case "line":
-        return { ...item, from: point(item.from), to: point(item.to) };
-      case "arc":
-        return { ...item, centre: point(item.centre) };
-      case "polygon":
-        return { ...item, points: item.points.map(point) };
-      case "text":
-        return { ...item, at: point(item.at), box: box(item.box) };
-    }
+    if (item.kind === "line") return { ...item, from: point(item.from), to: point(item.to) };
+    if (item.kind === "arc") return { ...item, centre: point(item.centre) };
+    if (item.kind === "polygon") return { ...item, points: item.points.map(point) };
+    return { ...item, at: point(item.at), box: box(item.box) };
   });
 }

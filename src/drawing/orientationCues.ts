@@ -43,7 +43,11 @@ export function orientationCues({ view, branches }: LaidChair, ground: Ground): 
       ),
     );
     cues.push(
-      freePlace(places, { lines: ground.lines, boxes: [...ground.boxes, ...cues.map((cue) => cue.box)] }),
+      freePlace(places, {
+        lines: ground.lines,
+        boxes: ground.boxes,
+        small: [...ground.small, ...cues.map((cue) => cue.box)],
+      }),
     );
   }
   return cues;

@@ -8,10 +8,10 @@ import type { SceneText } from "./Scene.ts";
 
 const DIRECTIONS = 32;
 /** Distances tried from the corner to the middle of the number, px; farther where a letter stands on the corner. */
-const REACHES = [8.5, 10, 12, 14.5, 17];
+const REACHES = [9.5, 11, 13, 15.5, 18, 21];
 const LETTER_REACH = 0.4 * LABEL_SIZE;
-/** Price of a direction straight into the ring; numbers stand outside it. */
-const INWARD = 14;
+/** Price of a direction straight into the ring. */
+const INWARD = 50;
 
 /** The small numbers of the ring atoms, outside the ring, clear of bonds and letters. */
 export function ringLocants({ view, letters }: LaidChair, ground: Ground): readonly SceneText[] {
@@ -35,12 +35,22 @@ export function ringLocants({ view, letters }: LaidChair, ground: Ground): reado
           atoms: [vertex.atom],
           group: view.group,
         }),
-        cost: (INWARD * (1 - Math.cos(angle - outward))) / 2 + 1.2 * (reach - REACHES[0]!),
+        cost: inwardCost(angle - outward) + 1.2 * (reach - REACHES[0]!),
       }));
     }).flat();
     placed.push(
-      freePlace(places, { lines: ground.lines, boxes: [...ground.boxes, ...placed.map((each) => each.box)] }),
+      freePlace(places, {
+        lines: ground.lines,
+        boxes: ground.boxes,
+        small: [...ground.small, ...placed.map((each) => each.box)],
+      }),
     );
   }
   return placed;
+}
+
+/** Free up to a right angle to either side of the outward direction, then dear: numbers stand outside the ring. */
+function inwardCost(turn: number): number {
+  const inward = Math.max(0, -Math.cos(turn) - 0.05);
+  return 2 * (1 - Math.cos(turn)) + INWARD * inward;
 }

@@ -1,6 +1,7 @@
 import type { Conformer, Dossier, Orientation, Ring } from "../dossier/Dossier.ts";
 import type { Branch, ChairView, Vertex, VertexLetters } from "./ChairView.ts";
 import { type Camera, projectPoint } from "./projectPoint.ts";
+import type { RingCamera } from "./RingCamera.ts";
 
 /** A bond this steep, as a share of its length along the ring's axis, is an axial one. */
 const AXIAL_SLOPE = 0.7;
@@ -15,7 +16,7 @@ export function viewChair(
   dossier: Dossier,
   conformer: Conformer,
   ring: Ring,
-  camera: Camera,
+  ringCamera: RingCamera,
   hydrogens: boolean,
 ): ChairView {
   const placed = conformer.geometry.atoms;
@@ -28,6 +29,12 @@ export function viewChair(
   const centre = (axis: "x" | "y" | "z") =>
     ringAtoms.reduce((sum, atom) => sum + atom[axis], 0) / ringAtoms.length;
   const [x, y, z] = [centre("x"), centre("y"), centre("z")];
+  const end = ringAtoms[ringCamera.rightEnd]!;
+  const direction = (Math.atan2(end.y - y, end.x - x) * 180) / Math.PI;
+  const camera: Camera = {
+    turn: (end.z > z ? ringCamera.azimuth : -ringCamera.azimuth) - direction,
+    elevation: ringCamera.elevation,
+  };
   const see = (atom: (typeof placed)[number]) =>
     projectPoint(camera, { x: atom.x - x, y: atom.y - y, z: atom.z - z });
 

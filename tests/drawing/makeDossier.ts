@@ -31,7 +31,17 @@ export interface DossierSpec {
 
 const RADIUS = 1.4652;
 const HEIGHT = 0.2305;
-const LENGTHS: Readonly<Record<string, number>> = { H: 1.1, C: 1.53, N: 1.47, O: 1.43, F: 1.36, Cl: 1.79, Br: 1.97, I: 2.15, Si: 1.88 };
+const LENGTHS: Readonly<Record<string, number>> = {
+  H: 1.1,
+  C: 1.53,
+  N: 1.47,
+  O: 1.43,
+  F: 1.36,
+  Cl: 1.79,
+  Br: 1.97,
+  I: 2.15,
+  Si: 1.88,
+};
 
 const sample = JSON.parse(
   readFileSync(new URL("../fixtures/sample.dossier.json", import.meta.url), "utf8"),
@@ -45,7 +55,14 @@ export const sampleDossier: Dossier = sample;
  * populations are invented and stand for nothing.
  */
 export function makeDossier(spec: DossierSpec): Dossier {
-  const atoms: { element: string; charge: number; isotope: number; hydrogens: number; x: number; y: number }[] = [];
+  const atoms: {
+    element: string;
+    charge: number;
+    isotope: number;
+    hydrogens: number;
+    x: number;
+    y: number;
+  }[] = [];
   const bonds: { from: number; to: number; order: 1; aromatic: false; wedge: null }[] = [];
   const rings = spec.rings.map((ringSpec, index): Ring => {
     const start = atoms.length;
@@ -68,7 +85,14 @@ export function makeDossier(spec: DossierSpec): Dossier {
     const substituents = ringSpec.groups.map((group) => {
       const atom = atoms.length;
       const angle = Math.PI / 2 - (Math.PI / 3) * group.at;
-      atoms.push({ element: group.element, charge: 0, isotope: 0, hydrogens: 0, x: 3 * Math.cos(angle) + 6 * index, y: 3 * Math.sin(angle) });
+      atoms.push({
+        element: group.element,
+        charge: 0,
+        isotope: 0,
+        hydrogens: 0,
+        x: 3 * Math.cos(angle) + 6 * index,
+        y: 3 * Math.sin(angle),
+      });
       bonds.push({ from: start + group.at, to: atom, order: 1, aromatic: false, wedge: null });
       return {
         ringAtom: start + group.at,
@@ -96,7 +120,8 @@ export function makeDossier(spec: DossierSpec): Dossier {
     const signs = rings.map((_, bit) => ((number >> bit) & 1 ? -1 : 1) as 1 | -1);
     const positions = rings.flatMap((ring, r) =>
       ring.substituents.map((substituent) => {
-        const up = signs[r]! * ((substituent.ringAtom - ring.atoms[0]!) % 2 === 0 ? 1 : -1) > 0 ? "up" : "down";
+        const up =
+          signs[r]! * ((substituent.ringAtom - ring.atoms[0]!) % 2 === 0 ? 1 : -1) > 0 ? "up" : "down";
         const orientation: Orientation = substituent.face === up ? "axial" : "equatorial";
         return {
           ring: r,
@@ -125,7 +150,10 @@ export function makeDossier(spec: DossierSpec): Dossier {
       u_kJ_mol: number === 0 ? 0 : 0.5,
       sum_kJ_mol: 0,
       population,
-      population95: spec.relation === "identical" || spec.relation === "enantiomeric" ? [population, population] : [Math.max(0, population - 0.03), Math.min(1, population + 0.02)],
+      population95:
+        spec.relation === "identical" || spec.relation === "enantiomeric"
+          ? [population, population]
+          : [Math.max(0, population - 0.03), Math.min(1, population + 0.02)],
       contributions: [],
       geometry: { atoms: rings.flatMap((ring, r) => ringGeometry(ring, signs[r]!, atoms)) },
     };
