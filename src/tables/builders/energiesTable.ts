@@ -65,6 +65,10 @@ function contributionRow(row: NumberedContribution, shown: readonly Conformer[])
   };
 }
 
+const EMPTY: Cell = { text: "" };
+/** Columns u, basis, source, medium and note say nothing about a result. */
+const REST: readonly Cell[] = [EMPTY, EMPTY, EMPTY, EMPTY, EMPTY];
+
 /** The row that a published value was read from; stand-ins have no row to show. */
 function registerRow({ basis, terms }: Contribution): Pick<Cell, "registerRow"> {
   const [term] = terms;
@@ -77,7 +81,7 @@ function results(dossier: Dossier, shown: readonly Conformer[]): readonly Row[] 
   const equilibrium = (id: string) => dossier.equilibria.find(({ to }) => to === id);
   const row = (title: string, cells: readonly Cell[]): Row => ({
     kind: "result",
-    cells: [{ text: "" }, { text: title }, ...cells],
+    cells: [EMPTY, { text: title }, ...cells, ...REST],
   });
   const others = (reference: Cell, cell: (conformer: Conformer) => Cell) =>
     shown.map((conformer) => (conformer === first ? reference : cell(conformer)));

@@ -1,4 +1,5 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
+import { NONE } from "../cells/NONE.ts";
 import { numberCell } from "../cells/numberCell.ts";
 import type { TableModel } from "../TableModel.ts";
 
@@ -39,7 +40,7 @@ export function stereocentresTable(dossier: Dossier): TableModel {
       { key: "descriptor", title: "Descriptor", align: "left" },
       { key: "remark", title: "Remark", align: "left" },
     ],
-    rows: rows.length > 0 ? rows : [{ cells: [{ text: "none" }] }],
+    rows: rows.length > 0 ? rows : [{ cells: [{ text: "none" }, NONE, NONE, NONE] }],
     notes: ["Atoms count from 0 in the order of the SMILES as given."],
   };
 }
