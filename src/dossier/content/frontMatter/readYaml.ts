@@ -1,8 +1,5 @@
 import { type Document, isMap, isScalar, parseDocument } from "yaml";
-import { type ReportAt, reportYamlProblems } from "./reportYamlProblems.ts";
-
-/** Aliases may repeat a value, but not multiply it (a few lines can otherwise stand for gigabytes). */
-const MOST_ALIASES = 20;
+import { MOST_ALIASES, type ReportAt, reportYamlProblems, TOO_MANY_ALIASES } from "./reportYamlProblems.ts";
 
 /**
  * Reads a set of keys from YAML text as plain data, or reports why not and gives null. The parser recurses,
@@ -41,12 +38,7 @@ export function readYaml(
   try {
     return { document, data: document.toJS({ maxAliasCount: MOST_ALIASES }) as Record<string, unknown> };
   } catch {
-    report(
-      "too-many-aliases",
-      0,
-      1,
-      `Aliases repeat values more than ${MOST_ALIASES} times; write the values out.`,
-    );
+    report("too-many-aliases", 0, 1, TOO_MANY_ALIASES);
     return null;
   }
 }

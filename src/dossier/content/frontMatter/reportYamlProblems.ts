@@ -1,6 +1,10 @@
 import { type Document, isCollection, isScalar, visit } from "yaml";
 import { explainYamlError } from "./explainYamlError.ts";
 
+/** Aliases may repeat a value, but not multiply it (a few lines can otherwise stand for gigabytes). */
+export const MOST_ALIASES = 20;
+export const TOO_MANY_ALIASES = `Aliases repeat values more than ${MOST_ALIASES} times; write the values out.`;
+
 /** Takes one problem with its offset in the YAML text. */
 export type ReportAt = (
   code: string,
@@ -35,11 +39,23 @@ export function reportYamlProblems(document: Document.Parsed, yaml: string, repo
     }
     report(code, offset, Math.max(1, found.length), message, suggestion);
   }
-  if (untrusted) return true;
+  return untrusted || reportAliases(document, report);
+}
+
+/** Reports aliases of nothing, of themselves, and beyond number; looking each one up costs a walk through the document. */
+function reportAliases(document: Document.Parsed, report: ReportAt): boolean {
+  let untrusted = false;
+  let count = 0;
   visit(document, {
     Alias: (_key, alias, ancestors) => {
+      count += 1;
+      if (count > MOST_ALIASES) {
+        report("too-many-aliases", alias.range![0], alias.range![1] - alias.range![0], TOO_MANY_ALIASES);
+        untrusted = true;
+        return visit.BREAK;
+      }
       const named = alias.resolve(document);
-      if (named !== undefined && !ancestors.includes(named)) return;
+      if (named !== undefined && !ancestors.includes(named)) return undefined;
       const [from, to] = alias.range!;
       report(
         "broken-yaml",
@@ -50,6 +66,7 @@ export function reportYamlProblems(document: Document.Parsed, yaml: string, repo
           : "This alias stands within the value that it names.",
       );
       untrusted = true;
+      return undefined;
     },
   });
   return untrusted;
