@@ -11,7 +11,7 @@ import { roundPopulation } from "./roundPopulation.ts";
 export function formatPopulation(population: number, interval: readonly [number, number]): string {
   const { value, low, high, exact } = roundPopulation(population, interval);
   const percent = "\u00a0%";
-  if (exact) return `${value}${percent} (${Number(value) === 100 ? "exact" : "exact by symmetry"})`;
+  if (exact) return `${value}${percent} (exact by symmetry)`;
   const range = low === high && /^[<>]/.test(low) ? low : joinInterval(low, high);
   return `${value}${percent} (${range}${percent})`;
 }

@@ -6,7 +6,7 @@ export interface RoundedPopulation {
   readonly value: string;
   readonly low: string;
   readonly high: string;
-  /** The interval has no width: the value is exact, as for chairs that are equal by symmetry. */
+  /** The interval has no width and the value is neither 0 nor 1: chairs that are equal by symmetry. */
   readonly exact: boolean;
 }
 
@@ -22,12 +22,13 @@ const MOST_DECIMALS = 1;
  */
 export function roundPopulation(population: number, interval: readonly [number, number]): RoundedPopulation {
   const [low, high] = interval;
-  const supported = decimalsFor(Math.max(0, 50 * (high - low)));
-  if (supported === null) {
+  // A share that no longer differs from 1 in floating point is beyond doubt, but it is not exact.
+  if (low === high && population > 0 && population < 1) {
     const whole = Number.isInteger(Number((100 * population).toPrecision(9)));
     const value = toDecimals(100 * population, whole ? 0 : MOST_DECIMALS);
     return { value, low: value, high: value, exact: true };
   }
+  const supported = decimalsFor(Math.max(0, 50 * (high - low))) ?? MOST_DECIMALS;
   const decimals = Math.min(MOST_DECIMALS, Math.max(0, supported));
   const set = (fraction: number) => openPercent(fraction, decimals);
   return { value: set(population), low: set(low), high: set(high), exact: false };

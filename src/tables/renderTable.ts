@@ -24,7 +24,7 @@ export function renderTable(model: TableModel, options: TableOptions = {}): stri
   return [
     `<div class="table-scroll" role="region" tabindex="0" aria-label="${escapeHtml(spoken)}">`,
     `<table class="table table-${escapeHtml(model.id)}" id="${id}">`,
-    `<caption>${number}${escapeHtml(model.caption)}</caption>`,
+    `<caption><span class="caption-text">${number}${escapeHtml(model.caption)}</span></caption>`,
     `<thead>\n<tr>${model.columns.map(heading).join("")}</tr>\n</thead>`,
     `<tbody>\n${body.join("\n")}\n</tbody>`,
     "</table>",

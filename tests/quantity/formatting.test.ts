@@ -101,7 +101,9 @@ describe("A population", () => {
     [0.0002, [0.00001, 0.005], "<0.1 % (<0.1 to 0.5 %)"],
     [0.99999, [0.9999, 0.999999], ">99.9 % (>99.9 %)"],
     [0.5, [0.5, 0.5], "50 % (exact by symmetry)"],
-    [1, [1, 1], "100 % (exact)"],
+    [1, [1, 1], ">99.9 % (>99.9 %)"],
+    [1e-20, [1e-21, 1e-19], "<0.1 % (<0.1 %)"],
+    [1 / 3, [1 / 3, 1 / 3], "33.3 % (exact by symmetry)"],
   ] as const)("of %d within %j is printed %s", (population, interval, printed) => {
     expect(plain(formatPopulation(population, interval))).toBe(printed);
   });
@@ -113,7 +115,6 @@ describe("A population", () => {
       fc.property(logit, half, (middle, width) => {
         const p = (x: number) => 1 / (1 + Math.exp(-x));
         const interval = [p(middle - width), p(middle + width)] as const;
-        if (interval[1] - interval[0] < 1e-9) return;
         const text = plain(formatPopulation(p(middle), interval));
         expect(text).not.toMatch(/(^|[^\d.>])(100(\.0)?|0(\.0)?)( %|–)/);
         expect(text).toMatch(/\(.+ %\)$/);

@@ -42,12 +42,13 @@ const to = (low: string, high: string) => `${low}\\ \\text{to}\\ ${high}`;
 function throughDifference(equilibrium: Equilibrium, first: Conformer, second: Conformer): readonly string[] {
   const [low, high] = equilibrium.deltaG95_kJ_mol;
   const [smallK, largeK] = equilibrium.K95;
+  const [lowEnd, highEnd] = ends(first);
   return [
     `\\Delta G^\\circ &: ${texEnergy(equilibrium.deltaG_kJ_mol)} \\pm ${FACTOR}\\times ${texEnergy(equilibrium.u_kJ_mol)}`,
     `&= ${to(texEnergy(low), texEnergy(high))}${KILOJOULE_PER_MOLE}`,
     `K &: ${to(texSignificant(smallK), texSignificant(largeK))}`,
-    `p(${texConformer(first.id)}) &: ${to(`\\frac{1}{1 + ${texSignificant(largeK)}}`, `\\frac{1}{1 + ${texSignificant(smallK)}}`)}`,
-    `&= ${to(...ends(first))}`,
+    `p(${texConformer(first.id)}) &: \\frac{1}{1 + ${texSignificant(largeK)}} = ${lowEnd}\\ \\text{to}`,
+    `&\\phantom{:}\\ \\frac{1}{1 + ${texSignificant(smallK)}} = ${highEnd}`,
     `p(${texConformer(second.id)}) &: ${to(...ends(second))}`,
   ];
 }

@@ -1,4 +1,5 @@
 import { formatPopulation } from "../../quantity/formatPopulation.ts";
+import { roundPopulation } from "../../quantity/roundPopulation.ts";
 import type { Cell } from "../TableModel.ts";
 
 /**
@@ -8,11 +9,11 @@ import type { Cell } from "../TableModel.ts";
  * @param interval - end points of the 95 % interval, fractions.
  */
 export function populationCell(population: number, interval: readonly [number, number]): Cell {
-  const exact = interval[0] === interval[1];
+  const { exact } = roundPopulation(population, interval);
   return {
     text: formatPopulation(population, interval),
     sortValue: population,
     numbers: [population, ...interval].map((fraction) => 100 * fraction),
-    ...(exact && population === 1 ? {} : { standing: exact ? "symmetry" : "computed" }),
+    standing: exact ? "symmetry" : "computed",
   };
 }
