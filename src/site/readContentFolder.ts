@@ -1,11 +1,16 @@
 import { createHash } from "node:crypto";
+import { createReadStream } from "node:fs";
 import { lstat, readdir, readFile, realpath } from "node:fs/promises";
 import { join, relative, sep } from "node:path";
 import type { Diagnostic } from "../diagnostics/Diagnostic.ts";
+import { compareDiagnostics } from "../diagnostics/printDiagnostic.ts";
 import type { AttachedFile, ContentFile } from "../dossier/content/CompoundInput.ts";
 
 /** Folders of a content folder that hold no content of their own. */
 const NOT_CONTENT = ["archive", "register"];
+
+/** Largest Markdown file that is read at all, in bytes; the reader itself refuses far smaller ones with a place. */
+const LARGEST_MARKDOWN = 8_000_000;
 
 /** What lies in a content folder: Markdown as text, other files of the series by digest, and what could not be read. */
 export interface ContentFolder {
@@ -61,17 +66,22 @@ export async function readContentFolder(folder: string): Promise<ContentFolder> 
     if (!entry.isFile()) return;
     const isMarkdown = name.endsWith(".md");
     if (!isMarkdown && !path.startsWith("series/")) return;
-    let bytes: Buffer;
+    if (isMarkdown && entry.size > LARGEST_MARKDOWN) {
+      return void report(
+        "file-too-large",
+        path,
+        `A Markdown file of ${entry.size} bytes is a mistake; it is not read.`,
+      );
+    }
+    let bytes: Buffer | null;
+    let sha256: string;
     try {
-      bytes = await readFile(full);
+      bytes = isMarkdown ? await readFile(full) : null;
+      sha256 = await digest(bytes ?? createReadStream(full));
     } catch {
       return void report("unreadable-file", path, "This file cannot be read; look at its permissions.");
     }
-    const sha256 = createHash("sha256").update(bytes).digest("hex");
-    if (!isMarkdown) {
-      attached.push({ path, sha256 });
-      return;
-    }
+    if (bytes === null) return void attached.push({ path, sha256 });
     const text = decode(bytes);
     if (typeof text === "string") files.push({ path, shownPath: shown(path), text, sha256 });
     else {
@@ -86,7 +96,21 @@ export async function readContentFolder(folder: string): Promise<ContentFolder> 
   };
 
   await visit("");
-  return { files, attached, problems };
+  return {
+    files: files.sort(byPath),
+    attached: attached.sort(byPath),
+    problems: problems.sort(compareDiagnostics),
+  };
+}
+
+const byPath = (a: { path: string }, b: { path: string }) => (a.path < b.path ? -1 : a.path > b.path ? 1 : 0);
+
+/** SHA-256 in lower-case hex. Attached files may be large and are hashed as they are read. */
+async function digest(bytes: Buffer | AsyncIterable<Buffer>): Promise<string> {
+  const hash = createHash("sha256");
+  if (bytes instanceof Uint8Array) return hash.update(bytes).digest("hex");
+  for await (const part of bytes) hash.update(part);
+  return hash.digest("hex");
 }
 
 function missingFolder(folder: string): Diagnostic {

@@ -1,3 +1,5 @@
+import fc from "fast-check";
+import MarkdownIt, { type Token } from "markdown-it";
 import { describe, expect, it } from "vitest";
 import { checkProse } from "../../src/dossier/content/checkProse.ts";
 import { findDirectives } from "../../src/dossier/content/findDirectives.ts";
@@ -76,6 +78,36 @@ describe("directives in prose", () => {
     expect(codes("::figure\n")).toEqual(["broken-directive"]);
     expect(codes("::figure[chair\n")).toEqual(["broken-directive"]);
     expect(codes("::figure[chair]{conformer}\n")).toEqual(["broken-directive"]);
+  });
+});
+
+describe("code in prose", () => {
+  it("is what a Markdown renderer takes for code, whatever stands around it", () => {
+    const renderer = new MarkdownIt({ html: false });
+    const shown = (tokens: readonly Token[]): string[] =>
+      tokens.flatMap(({ children, type, content }) =>
+        children !== null
+          ? shown(children)
+          : type === "text"
+            ? [...content.matchAll(/(?<![\w:]):value\[(v\d)\]/g)].map((match) => match[1]!)
+            : [],
+      );
+    const start = fc
+      .array(fc.constantFrom("- ", "1. ", "> ", "    ", "  ", "`", "``", "```", "~~~", "text", " ", "\t"), {
+        maxLength: 4,
+      })
+      .map((parts) => parts.join(""));
+    const document = fc
+      .array(fc.tuple(start, fc.boolean()), { minLength: 1, maxLength: 6 })
+      .map((lines) =>
+        lines.map(([line, has], index) => (has ? `${line}:value[v${index}]` : line)).join("\n"),
+      );
+    fc.assert(
+      fc.property(document, (markdown) => {
+        expect(findDirectives(markdown).map(({ name }) => name)).toEqual(shown(renderer.parse(markdown, {})));
+      }),
+      { seed: 5, numRuns: 500 },
+    );
   });
 });
 

@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { printDiagnostic } from "../../src/diagnostics/printDiagnostic.ts";
 import { readContent } from "../../src/dossier/content/readContent.ts";
 import { readContentFolder } from "../../src/site/readContentFolder.ts";
+import { sourceFiles } from "../sourceFiles.ts";
 import { SMALL_REGISTER } from "./smallRegister.ts";
 
 const fixtures = fileURLToPath(new URL("../fixtures/mistakes/", import.meta.url));
@@ -34,5 +35,19 @@ describe("mistakes in content", () => {
     );
     expect(problems).toEqual([]);
     expect(shown.sort()).toEqual(await expected());
+  });
+
+  it("have a fixture for every code that the reader of content can give", async () => {
+    const sources = sourceFiles(["src/dossier/content"], /\.ts$/);
+    const given = sources.flatMap(({ text }) =>
+      [...text.matchAll(/(?:code: |problem\(\s*|report\(\s*|code:\s*\| )"([a-z]+(?:-[a-z]+)+)"/g)].map(
+        (match) => match[1]!,
+      ),
+    );
+    const shown = new Set((await expected()).map((line) => line.replace(/^.* /, "")));
+    // Files with these would be unwieldy; `parseFrontMatter.test.ts` makes them.
+    const made = ["nul-character", "file-too-large"];
+    expect(given.length).toBeGreaterThan(30);
+    expect([...new Set(given)].filter((code) => !shown.has(code) && !made.includes(code))).toEqual([]);
   });
 });
