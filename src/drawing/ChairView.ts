@@ -1,4 +1,5 @@
 import type { Orientation } from "../dossier/Dossier.ts";
+import type { AtomLetters } from "./atomLetters.ts";
 import type { ProjectedPoint } from "./projectPoint.ts";
 
 /** One chair of one ring as the camera sees it, before labels are placed. Points in px, ring centre at the origin. */
@@ -16,15 +17,7 @@ export interface Vertex {
   readonly locant: string;
   readonly at: ProjectedPoint;
   /** Letters set at the vertex instead of a bare corner; null for carbon without charge or mass number. */
-  readonly letters: VertexLetters | null;
-}
-
-export interface VertexLetters {
-  readonly element: string;
-  /** `H`, `H_2`, or empty. */
-  readonly hydrogens: string;
-  /** `^+`, or empty. */
-  readonly charge: string;
+  readonly letters: AtomLetters | null;
 }
 
 /** A bond from a ring atom to a group, or to a hydrogen that is drawn. */

@@ -7,6 +7,7 @@ export function describeConformer(dossier: Dossier, conformer: Conformer): strin
   const rings = dossier.rings.map((ring, index) => {
     const places = conformer.positions
       .filter((position) => position.ring === ring.index)
+      .sort((a, b) => Number.parseInt(a.locant, 10) - Number.parseInt(b.locant, 10))
       .map((position) => `${labelText(position.group)} ${position.orientation} at ${position.locant}`);
     const groups = places.length === 0 ? "no groups" : listed(places);
     const name =

@@ -20,6 +20,7 @@ const COLUMN_GAP = 28;
 
 /** All conformers of a dossier with their populations, and the equilibrium between them. */
 export function equilibriumScene(dossier: Dossier, options: FigureOptions = {}): Scene {
+  if (dossier.conformers.length === 0) throw new RangeError(`${dossier.code} has no conformers to draw`);
   const drawn = dossier.conformers.slice(0, MOST_DRAWN);
   const hydrogens = options.hydrogens ?? false;
   const cameras = chooseCameras(dossier, hydrogens);
@@ -32,7 +33,7 @@ export function equilibriumScene(dossier: Dossier, options: FigureOptions = {}):
   return {
     title: `Conformers of ${dossier.name}`,
     description: describeConformers(dossier),
-    bounds: growBox(boundsOf(items) ?? { left: 0, top: 0, right: 0, bottom: 0 }, MARGIN),
+    bounds: growBox(boundsOf(items)!, MARGIN),
     items,
   };
 }

@@ -5,6 +5,9 @@
  */
 export const BOND = 42;
 
+/** Bond length of flat diagrams. */
+export const FLAT_BOND = 36;
+
 /** Pixels per ångström: the C–C bond of cyclohexane, 1.536 Å, is one bond length. */
 export const SCALE = BOND / 1.536;
 
@@ -35,3 +38,5 @@ export const MARGIN = 6;
 export const MAXIMUM_WIDTH = 480;
 /** More conformers than this are told in words. */
 export const MOST_DRAWN = 8;
+/** Curves in one plot; more cannot be told apart. */
+export const MOST_CURVES = 6;

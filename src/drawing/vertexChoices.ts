@@ -1,4 +1,3 @@
-import { parseLabel } from "../quantity/parseLabel.ts";
 import type { Vertex } from "./ChairView.ts";
 import type { LabelChoice } from "./LabelSlot.ts";
 import { labelRuns } from "./labelRuns.ts";
@@ -23,10 +22,12 @@ export function vertexChoices(vertex: Vertex, group: string): readonly LabelChoi
     const last = labelRuns(markup, style).at(-1);
     return last === undefined ? 0 : last.x + last.width;
   };
-  const half = width(element) / 2;
+  // A mass number hangs before the letter that stands on the corner.
+  const prefix = width(element) - width(element.replace(/^\^\d+/, ""));
+  const half = (width(element) - prefix) / 2;
   const middle: Point = { x: vertex.at.x, y: vertex.at.y + HEIGHT / 2 };
   const core: Box = {
-    left: middle.x - half,
+    left: middle.x - half - prefix,
     right: middle.x + half,
     top: middle.y - HEIGHT,
     bottom: middle.y,
@@ -58,14 +59,9 @@ export function vertexChoices(vertex: Vertex, group: string): readonly LabelChoi
     const outward = down === Math.sign(vertex.at.y || 1);
     return choice([withCharge, hydrogen], [...chargeBox, hydrogen.box], outward ? 2 : 4);
   });
-  const letterCount = parseLabel(element).length;
   return [
     choice([right], [{ ...right.box, left: core.right }], vertex.at.x >= 0 ? 0 : 3),
-    choice(
-      [left],
-      [{ ...left.box, right: core.left }, ...chargeBox],
-      (vertex.at.x < 0 ? 0 : 3) + letterCount - 1,
-    ),
+    choice([left], [{ ...left.box, right: core.left }, ...chargeBox], vertex.at.x < 0 ? 0 : 3),
     ...stacked,
   ];
 }

@@ -1,5 +1,6 @@
 import type { Conformer, Dossier, Orientation, Ring } from "../dossier/Dossier.ts";
-import type { Branch, ChairView, Vertex, VertexLetters } from "./ChairView.ts";
+import { type AtomLetters, atomLetters } from "./atomLetters.ts";
+import type { Branch, ChairView, Vertex } from "./ChairView.ts";
 import { type Camera, projectPoint } from "./projectPoint.ts";
 import type { RingCamera } from "./RingCamera.ts";
 
@@ -85,16 +86,10 @@ export function viewChair(
   };
 }
 
-function lettersOf(dossier: Dossier, atom: number): VertexLetters | null {
-  const { element, charge, isotope, hydrogens } = dossier.structure.atoms[atom]!;
-  if (element === "C" && charge === 0 && isotope === 0) return null;
-  const count = element === "C" ? 0 : hydrogens;
-  const size = Math.abs(charge) > 1 ? String(Math.abs(charge)) : "";
-  return {
-    element: isotope === 0 ? element : `^${isotope}${element}`,
-    hydrogens: count === 0 ? "" : count === 1 ? "H" : `H_${count}`,
-    charge: charge === 0 ? "" : `^${size}${charge > 0 ? "+" : "-"}`,
-  };
+function lettersOf(dossier: Dossier, index: number): AtomLetters | null {
+  const atom = dossier.structure.atoms[index]!;
+  if (atom.element === "C" && atom.charge === 0 && atom.isotope === 0) return null;
+  return atomLetters(atom, atom.element !== "C");
 }
 
 function frontBond(vertices: readonly Vertex[]): number {

@@ -1,0 +1,86 @@
+import type { Conformer, Dossier } from "../dossier/Dossier.ts";
+import { formatTemperature } from "../quantity/formatTemperature.ts";
+import { chairScene } from "./chairScene.ts";
+import { describeConformer } from "./describeConformer.ts";
+import { describeConformers } from "./describeConformers.ts";
+import { describeStructure } from "./describeStructure.ts";
+import { describeTemperatures } from "./describeTemperatures.ts";
+import { equilibriumScene } from "./equilibriumScene.ts";
+import type { Figure } from "./Figure.ts";
+import type { FigureOptions } from "./FigureOptions.ts";
+import { temperatureScene } from "./temperatureScene.ts";
+import { wedgeScene } from "./wedgeScene.ts";
+
+export type FigureName = "equilibrium" | "chair" | "wedge" | "temperature";
+
+/** Every kind of figure by the name that authors write in `::figure[…]`. */
+export const FIGURES: Readonly<Record<FigureName, Figure>> = {
+  equilibrium: {
+    title: "Conformers and their equilibrium",
+    caption: captionOfEquilibrium,
+    describe: (dossier) => describeConformers(dossier),
+    canShow: (dossier) => dossier.conformers.length > 0,
+    scene: equilibriumScene,
+  },
+  chair: {
+    title: "One conformer",
+    caption: (dossier, options = {}) => {
+      const { id, label } = chosenConformer(dossier, options);
+      return `Conformer ${id}${label === "" ? "" : ` (${label})`} of ${dossier.name}. ${CUES}`;
+    },
+    describe: (dossier, options = {}) => describeConformer(dossier, chosenConformer(dossier, options)),
+    canShow: (dossier, options = {}) =>
+      dossier.conformers.length > 0 &&
+      (options.conformer === undefined || dossier.conformers.some(({ id }) => id === options.conformer)),
+    scene: (dossier, options = {}) => chairScene(dossier, chosenConformer(dossier, options).id, options),
+  },
+  wedge: {
+    title: "Structural diagram",
+    caption: (dossier) => {
+      const wedged = dossier.structure.bonds.some((bond) => bond.wedge !== null);
+      const wedges = wedged
+        ? " Solid wedges point towards the viewer, hashed wedges away; the narrow end is at the stereocentre."
+        : "";
+      return `Structural diagram of ${dossier.name} with ring locants.${wedges}`;
+    },
+    describe: (dossier) => describeStructure(dossier),
+    canShow: (dossier) => dossier.structure.atoms.length > 0,
+    scene: wedgeScene,
+  },
+  temperature: {
+    title: "Populations against temperature",
+    caption: (dossier) =>
+      `Populations of the conformers of ${dossier.name} (${medium(dossier)}) against temperature. ` +
+      "Bands: 95 % intervals; dotted line: 50 %; " +
+      `vertical line: ${formatTemperature(dossier.conditions.temperature_K)}.`,
+    describe: (dossier) => describeTemperatures(dossier),
+    canShow: (dossier) => dossier.conformers.length > 0 && dossier.temperatures.length > 1,
+    scene: temperatureScene,
+  },
+};
+
+const CUES = "The nearer ring edge is heavier; the letters a and e mark axial and equatorial bonds.";
+
+function captionOfEquilibrium(dossier: Dossier): string {
+  const several = dossier.conformers.length > 1;
+  const what = several ? "Conformers" : "The conformer";
+  const arrows =
+    several && !dossier.equilibria.every((each) => each.bySymmetry)
+      ? " Arrow lengths show the direction of the equilibrium, on a logarithmic scale."
+      : "";
+  return (
+    `${what} of ${dossier.name} (${medium(dossier)}) at ${formatTemperature(dossier.conditions.temperature_K)}, ` +
+    `with populations and 95 % intervals. ${CUES}${arrows}`
+  );
+}
+
+function medium({ conditions }: Dossier): string {
+  return conditions.solvent === "unstated" ? "solvent not stated" : conditions.solventLabel;
+}
+
+function chosenConformer(dossier: Dossier, options: FigureOptions): Conformer {
+  const id = options.conformer ?? dossier.conformers[0]?.id;
+  const found = dossier.conformers.find((conformer) => conformer.id === id);
+  if (found === undefined) throw new RangeError(`${dossier.code} has no conformer ${id ?? "to draw"}`);
+  return found;
+}
