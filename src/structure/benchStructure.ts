@@ -16,6 +16,7 @@ const ORGANIC_SUBSET = ["B", "C", "N", "O", "P", "S"];
 const PYRAMIDAL = ["P", "As", "S", "Se", "Te"];
 /** Elements that carry one group, and two as a cation. */
 const TRIVALENT = ["N", "P", "As"];
+const LOCANTS = [1, 2, 3, 4, 5, 6] as const;
 const FACES = ["up", "down"] as const;
 
 /**
@@ -27,8 +28,8 @@ const FACES = ["up", "down"] as const;
  * writes `@@` for the order lower, p, n, upper. One absolute configuration is worked out by hand in the tests.
  *
  * Marks are written wherever the two faces differ; on a centre that is not stereogenic a mark is
- * harmless. Nitrogen inverts, so one group on it has no face. The ring is written from a locant that
- * needs no mark for a lone pair, because readers disagree about such an atom in first place.
+ * harmless. Nitrogen inverts, so one group on it has no face. The ring is closed between atoms
+ * that need no mark for a lone pair, because readers disagree about such an atom in first place or at a closure.
  */
 export function benchStructure(
   parent: RingParent,
@@ -38,7 +39,14 @@ export function benchStructure(
   for (const locant of groups.keys()) {
     if (!Number.isInteger(locant) || locant < 1 || locant > 6) throw new Error(`no locant ${locant}`);
   }
-  const start = [1, 2, 3, 4, 5, 6].find((k) => !PYRAMIDAL.includes(parent.elements[k - 1]!)) ?? 1;
+  const hasLonePairMark = (locant: number): boolean => {
+    const { up, down } = groups.get(locant) ?? {};
+    return PYRAMIDAL.includes(parent.elements[locant - 1]!) && (up === undefined) !== (down === undefined);
+  };
+  const start =
+    LOCANTS.find((k) => !hasLonePairMark(k) && !hasLonePairMark(k === 1 ? 6 : k - 1)) ??
+    LOCANTS.find((k) => !hasLonePairMark(k)) ??
+    1;
   const ringLocants: number[] = [];
   let smiles = "";
   let atoms = 0;

@@ -4,7 +4,9 @@ import fc from "fast-check";
 import { beforeAll, describe, expect, it } from "vitest";
 import type { Group, RingParent } from "../../src/register/Register.ts";
 import { benchStructure, type FaceGroups } from "../../src/structure/benchStructure.ts";
+import { loadToolkit } from "../../src/structure/loadToolkit.ts";
 import { ringAtomCapacity } from "../../src/structure/ringAtomCapacity.ts";
+import { ringFaces } from "../../src/structure/ringFaces.ts";
 
 let rdkit: MainModule;
 beforeAll(async () => {
@@ -217,5 +219,47 @@ describe("bench notation written as SMILES", () => {
       }),
       { seed: 61, numRuns: 200 },
     );
+  });
+
+  it("puts every group on the face where the structure's own reading finds it", async () => {
+    const toolkit = await loadToolkit();
+    const firstAtom = new Map([
+      ["Me", "C"],
+      ["OH", "O"],
+      ["Cl", "Cl"],
+      ["=O", "O"],
+    ]);
+    const simple = fc.option(fc.constantFrom(Me, OH, Cl));
+    const entries = fc.uniqueArray(
+      fc.record({ locant: fc.integer({ min: 1, max: 6 }), up: simple, down: simple }),
+      { selector: ({ locant }) => locant, minLength: 1, maxLength: 6 },
+    );
+    let compared = 0;
+    fc.assert(
+      fc.property(fc.constantFrom(...PARENTS), entries, (parent, chosen) => {
+        const groups = new Map(placeable(parent, chosen));
+        for (const { locant, up } of chosen) {
+          // Sulfoxides: wherever a group was drawn for a sulfur atom, oxygen stands on that face instead.
+          if (["S", "Se", "Te"].includes(parent.elements[locant - 1]!)) {
+            groups.set(locant, up === null ? { down: oxo } : { up: oxo });
+          }
+        }
+        const { smiles, ringLocants } = benchStructure(parent, groups);
+        const read = toolkit.read(smiles);
+        if (!read.ok) throw new Error(`${smiles}: ${read.reason}`);
+        const element = (atom: number | null) =>
+          atom === null ? undefined : read.molecule.atoms[atom]!.element;
+        for (const [index, site] of ringFaces(read.molecule, ringLocants).entries()) {
+          if (site.faces !== "fixed") continue;
+          const { up, down } = groups.get(index + 1) ?? {};
+          compared += 1;
+          expect([element(site.up), element(site.down)]).toEqual(
+            [up, down].map((hung) => (hung === undefined ? undefined : firstAtom.get(hung.key))),
+          );
+        }
+      }),
+      { seed: 62, numRuns: 1000 },
+    );
+    expect(compared).toBeGreaterThan(200);
   });
 });
