@@ -120,6 +120,21 @@ describe("The energy table", () => {
     expect(results[3]!.cells[2]!.text).toMatch(/\(.*%\)$/);
   });
 
+  test("does not repeat in the note why a stand-in was used", () => {
+    const [first, second] = sampleDossier().conformers;
+    const [contribution] = second!.contributions;
+    const why = "No value for X; its class stands in.";
+    const standIn = {
+      ...contribution!,
+      basis: "not available" as const,
+      source: why,
+      note: `${why} Seen once.`,
+    };
+    const dossier = { ...sampleDossier(), conformers: [first!, { ...second!, contributions: [standIn] }] };
+    expect(text(TABLES["energies"]!(dossier), 0, "source")).toBe(why);
+    expect(text(TABLES["energies"]!(dossier), 0, "note")).toBe("Seen once.");
+  });
+
   test("keeps ten conformers readable by writing out the first ones and saying so", () => {
     const many = madeDossier(
       ROWS,

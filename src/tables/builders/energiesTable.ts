@@ -60,7 +60,7 @@ function contributionRow(row: NumberedContribution, shown: readonly Conformer[])
       { text: words, standing, ...registerRow(contribution) },
       { text: contribution.source, sourceKeys: contribution.sourceKeys },
       { text: temperature === null ? medium : `${medium}, ${formatTemperature(temperature)}` },
-      { text: contribution.note ?? "" },
+      { text: noteText(contribution) },
     ],
   };
 }
@@ -68,6 +68,11 @@ function contributionRow(row: NumberedContribution, shown: readonly Conformer[])
 const EMPTY: Cell = { text: "" };
 /** Columns u, basis, source, medium and note say nothing about a result. */
 const REST: readonly Cell[] = [EMPTY, EMPTY, EMPTY, EMPTY, EMPTY];
+
+/** What the source column has not said already: of a stand-in it tells the whole story. */
+function noteText({ note, source }: Contribution): string {
+  return (note ?? "").replace(source, "").trim();
+}
 
 /** The row that a published value was read from; stand-ins have no row to show. */
 function registerRow({ basis, terms }: Contribution): Pick<Cell, "registerRow"> {
