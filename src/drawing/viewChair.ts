@@ -1,6 +1,7 @@
 import type { Conformer, Dossier, Orientation, Ring } from "../dossier/Dossier.ts";
 import { type AtomLetters, atomLetters } from "./atomLetters.ts";
 import type { Branch, ChairView, Vertex } from "./ChairView.ts";
+import { drawnEnd } from "./drawnEnd.ts";
 import { type Camera, projectPoint } from "./projectPoint.ts";
 import type { RingCamera } from "./RingCamera.ts";
 
@@ -39,6 +40,9 @@ export function viewChair(
   const see = (atom: (typeof placed)[number]) =>
     projectPoint(camera, { x: atom.x - x, y: atom.y - y, z: atom.z - z });
 
+  const seeEnd = (atom: (typeof placed)[number], vertex: number, orientation: Orientation) =>
+    see(orientation === "axial" ? atom : { ...atom, ...drawnEnd(ringAtoms, vertex, atom) });
+
   const vertices = ring.atoms.map(
     (atom, index): Vertex => ({
       atom,
@@ -59,11 +63,12 @@ export function viewChair(
         `conformer ${conformer.id} has no place for the group at atom ${substituent.atom}`,
       );
     }
+    const vertex = ring.atoms.indexOf(substituent.ringAtom);
     return {
-      vertex: ring.atoms.indexOf(substituent.ringAtom),
+      vertex,
       atom: substituent.atom,
       orientation: position.orientation,
-      end: see(found),
+      end: seeEnd(found, vertex, position.orientation),
       label: substituent.label,
       labelReversed: substituent.labelReversed,
     };
@@ -76,7 +81,16 @@ export function viewChair(
     const from = ringAtoms[vertex]!;
     const rise = Math.abs(atom.z - from.z) / Math.hypot(atom.x - from.x, atom.y - from.y, atom.z - from.z);
     const orientation: Orientation = rise > AXIAL_SLOPE ? "axial" : "equatorial";
-    return [{ vertex, atom: null, orientation, end: see(atom), label: "H", labelReversed: "H" }];
+    return [
+      {
+        vertex,
+        atom: null,
+        orientation,
+        end: seeEnd(atom, vertex, orientation),
+        label: "H",
+        labelReversed: "H",
+      },
+    ];
   });
   return {
     group: `${conformer.id}/${ring.index}`,
