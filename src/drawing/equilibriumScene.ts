@@ -76,26 +76,28 @@ function drawRows(
   drawn: readonly Conformer[],
   blocks: readonly ConformerBlock[],
 ): readonly SceneItem[] {
-  const headed = blocks.map((block, index) => {
-    const items = blockItems(block);
+  const heads = blocks.map((block, index) => {
     const equilibrium = dossier.equilibria.find((each) => each.to === drawn[index]!.id);
-    return index === 0 || equilibrium === undefined
-      ? items
-      : [...items, ...heading(equilibrium, block.chairBounds.top)];
+    return index === 0 || equilibrium === undefined ? [] : heading(equilibrium, block.chairBounds.top);
   });
-  const widest = Math.max(...headed.map((items) => widthOf(boundsOf(items)!)));
-  const columns = Math.max(
-    1,
-    Math.min(headed.length, Math.floor((MAXIMUM_WIDTH + COLUMN_GAP) / (widest + COLUMN_GAP))),
-  );
+  const widest = Math.max(...blocks.map((block) => widthOf(columnOf(block))));
+  const fitting = Math.floor((MAXIMUM_WIDTH + COLUMN_GAP) / (widest + COLUMN_GAP));
+  const columns = Math.max(1, Math.min(blocks.length, fitting));
   const items: SceneItem[] = [];
   let below = 0;
-  for (let start = 0; start < headed.length; start += columns) {
-    const row = headed.slice(start, start + columns);
-    const top = Math.min(...row.map((each) => boundsOf(each)!.top));
-    const down = start === 0 ? 0 : below + ROW_GAP - top;
-    for (const [column, each] of row.entries())
-      items.push(...moveItems(each, column * (widest + COLUMN_GAP), down));
+  for (let start = 0; start < blocks.length; start += columns) {
+    const row = blocks.slice(start, start + columns);
+    // Words of one row stand on one line, below its deepest chair.
+    const wordsTop = Math.max(...row.map((block) => block.chairBounds.bottom)) + WORD_GAP;
+    const cells = row.map((block, column) => [
+      ...(heads[start + column] ?? []),
+      ...block.chairs,
+      ...moveItems(block.words, 0, wordsTop),
+    ]);
+    const down = start === 0 ? 0 : below + ROW_GAP - Math.min(...cells.map((cell) => boundsOf(cell)!.top));
+    for (const [column, cell] of cells.entries()) {
+      items.push(...moveItems(cell, column * (widest + COLUMN_GAP), down));
+    }
     below = boundsOf(items)!.bottom;
   }
   const rest = dossier.conformers.length - drawn.length;
