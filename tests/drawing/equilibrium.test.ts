@@ -27,7 +27,9 @@ describe("The two half-headed arrows", () => {
 
   test("have lengths in the order of the equilibrium constants", () => {
     for (let index = 1; index < ratios.length; index++) {
-      expect(ratios[index]!).toBeGreaterThanOrEqual(ratios[index - 1]!);
+      const clamped = constants[index]! <= 0.01 || constants[index - 1]! >= 100;
+      if (clamped) expect(ratios[index]!).toBeCloseTo(ratios[index - 1]!, 6);
+      else expect(ratios[index]!).toBeGreaterThan(ratios[index - 1]!);
     }
   });
 
