@@ -5,7 +5,7 @@ import { conformerBlock } from "./conformerBlock.ts";
 import { describeConformer } from "./describeConformer.ts";
 import type { FigureOptions } from "./FigureOptions.ts";
 import { growBox } from "./growBox.ts";
-import { MARGIN } from "./measures.ts";
+import { MARGIN, WORD_GAP } from "./measures.ts";
 import { moveItems } from "./moveItems.ts";
 import type { Scene } from "./Scene.ts";
 
@@ -16,7 +16,7 @@ export function chairScene(dossier: Dossier, conformerId: string, options: Figur
   const hydrogens = options.hydrogens ?? false;
   const cameras = chooseCameras(dossier, hydrogens);
   const block = conformerBlock(dossier, conformer, cameras, { hydrogens, locants: options.locants ?? true });
-  const items = [...block.chairs, ...moveItems(block.words, 0, block.chairBounds.bottom + 14)];
+  const items = [...block.chairs, ...moveItems(block.words, 0, block.chairBounds.bottom + WORD_GAP)];
   return {
     title: `Conformer ${conformer.id} of ${dossier.name}`,
     description: describeConformer(dossier, conformer),

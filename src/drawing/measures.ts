@@ -32,6 +32,9 @@ export const ASCENDER = 0.72;
 export const DESCENDER = 0.21;
 export const LINE_HEIGHT = 1.3;
 
+/** Between the chairs of a conformer and its words. */
+export const WORD_GAP = 14;
+
 /** Free margin around a figure. */
 export const MARGIN = 6;
 /** Figures are broken into rows rather than drawn wider than this. */
