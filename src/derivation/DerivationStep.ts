@@ -15,7 +15,7 @@ export interface DerivationStep {
 export interface DerivationKey {
   /** As printed in the formula, in plain text: `(3)`, `u1`. */
   readonly symbol: string;
-  /** Label markup allowed, except where `row` is given: then it is the row's own name. */
+  /** Label markup allowed. */
   readonly meaning: string;
   /** Register row or stand-in that the symbol stands for, for a link to the register. */
   readonly row?: string;

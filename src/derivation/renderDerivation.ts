@@ -47,9 +47,8 @@ function key(step: DerivationStep, options: DerivationOptions): readonly string[
 }
 
 function meaningHtml({ meaning, row }: DerivationKey, { rowHref }: DerivationOptions): string {
-  if (row === undefined) return labelHtml(meaning);
-  const href = rowHref?.(row);
-  const text = escapeHtml(row);
+  const text = labelHtml(meaning);
+  const href = row === undefined ? undefined : rowHref?.(row);
   return href === undefined ? text : `<a href="${escapeHtml(href)}">${text}</a>`;
 }
 

@@ -32,8 +32,10 @@ function withSources(cell: Cell, links: CellLinks, set: (text: string) => string
     if (href !== undefined) keys.set(key, href);
   }
   if (keys.size === 0) return set(cell.text);
+  // Split at the keys only, so that label markup between them stays whole.
+  const names = [...keys.keys()].map((key) => key.replace(/[^A-Za-z0-9]/g, "\\$&"));
   return cell.text
-    .split(/([A-Za-z0-9-]+)/)
+    .split(new RegExp(`(?<![A-Za-z0-9-])(${names.join("|")})(?![A-Za-z0-9-])`))
     .map((part) => {
       const href = keys.get(part);
       return href === undefined ? set(part) : anchor(href, set(part));

@@ -3,6 +3,7 @@ import { describe, expect, test } from "vitest";
 import { numberContributions } from "../../src/derivation/numberContributions.ts";
 import type { Series } from "../../src/dossier/Collection.ts";
 import type { Dossier } from "../../src/dossier/Dossier.ts";
+import { cellHtml } from "../../src/tables/cellHtml.ts";
 import { contributionStanding } from "../../src/tables/contributionStanding.ts";
 import { renderTable } from "../../src/tables/renderTable.ts";
 import { SERIES_TABLES } from "../../src/tables/SERIES_TABLES.ts";
@@ -184,6 +185,13 @@ describe("A rendered table", () => {
     expect(html).toContain('<th scope="row"');
     expect(html).toContain('id="sx-01-table-energies-row-1"');
     expect(html).toContain("<i>t</i>-Bu axial");
+  });
+
+  test("links a citation key without cutting label markup beside it", () => {
+    const cell = { text: "EW94 for C_6H_11, EW94b", markup: true, sourceKeys: ["EW94"] };
+    expect(cellHtml(cell, { sourceHref: (key) => `#${key}` })).toBe(
+      '<a href="#EW94">EW94</a> for C<sub>6</sub>H<sub>11</sub>, EW94b',
+    );
   });
 
   test("links citation keys and register rows where the caller knows their place", () => {

@@ -58,9 +58,9 @@ function contributionRow(row: NumberedContribution, shown: readonly Conformer[])
       ...shown.map(({ id }) => (row.conformers.includes(id) ? value : NONE)),
       uncertaintyCell(contribution.u_kJ_mol),
       { text: words, standing, ...registerRow(contribution) },
-      { text: contribution.source, sourceKeys: contribution.sourceKeys },
+      { text: contribution.source, sourceKeys: contribution.sourceKeys, markup: true },
       { text: temperature === null ? medium : `${medium}, ${formatTemperature(temperature)}` },
-      { text: noteText(contribution) },
+      { text: noteText(contribution), markup: true },
     ],
   };
 }
