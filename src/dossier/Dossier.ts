@@ -133,7 +133,10 @@ export interface Ring {
   readonly ringKey: string;
   readonly substituents: readonly RingSubstituent[];
   /** cis/trans of every pair of substituted ring atoms that carry one group each. */
-  readonly configuration: readonly { readonly locants: readonly [string, string]; readonly relation: "cis" | "trans" }[];
+  readonly configuration: readonly {
+    readonly locants: readonly [string, string];
+    readonly relation: "cis" | "trans";
+  }[];
 }
 
 export interface RingSubstituent {

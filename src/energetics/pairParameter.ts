@@ -16,7 +16,7 @@ export interface PairParameter {
 }
 
 /**
- * The register's value for a pair of groups, or that of a pair of the same classes, widened.
+ * The register's value for a pair of groups, or (not for geminal pairs) that of a pair of the same classes, widened.
  * @returns undefined when neither exists; the caller then states its own stand-in.
  */
 export function pairParameter(
@@ -33,6 +33,8 @@ export function pairParameter(
     const own = lookup(first, second);
     if (own !== undefined) return { parameter: rowParameter(own), reversed: own.reversed };
   }
+  // How two groups on one atom make room for each other is too particular to be borrowed.
+  if (kind === "geminal") return undefined;
   const firsts = [...(first === undefined ? [] : [first]), ...similarGroups(context.register, pair[0])];
   const seconds = [...(second === undefined ? [] : [second]), ...similarGroups(context.register, pair[1])];
   // Loans that change one group only come before loans that change both.

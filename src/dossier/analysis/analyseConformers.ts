@@ -212,11 +212,16 @@ function contributionOf(term: EnergyTerm, temperature: number): Contribution {
   };
 }
 
-/** True when each ring of one can be laid on that of the other, or, for a single ring, on its mirror image. */
+/**
+ * True when each ring of one conformer can be laid on that of the other, for two rings also crosswise, or for a single
+ * ring on its mirror image. More than two rings are compared in their own places only: whether an exchange of several
+ * rings is a symmetry of the whole molecule cannot be seen from the rings one by one.
+ */
 function equalBySymmetry(molecule: Molecule, a: ChairSet, b: ChairSet): boolean {
-  const relations = a.map((chair, i) => relateChairs(molecule, chair, b[i]!));
-  if (relations.every((relation) => relation === "identical")) return true;
-  return relations.length === 1 && relations[0] === "enantiomeric";
+  const relation = (i: number, j: number) => relateChairs(molecule, a[i]!, b[j]!);
+  if (a.every((_, i) => relation(i, i) === "identical")) return true;
+  if (a.length === 1) return relation(0, 0) === "enantiomeric";
+  return a.length === 2 && relation(0, 1) === "identical" && relation(1, 0) === "identical";
 }
 
 /**
