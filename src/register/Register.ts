@@ -41,7 +41,13 @@ export interface GroupClass {
 }
 
 /** What kind of quantity a row states; also the name of the table it stands in. */
-export type RowKind = "axial group" | "anomeric" | "vicinal gauche" | "syn-axial" | "geminal" | "nitrogen substituent";
+export type RowKind =
+  | "axial group"
+  | "anomeric"
+  | "vicinal gauche"
+  | "syn-axial"
+  | "geminal"
+  | "nitrogen substituent";
 
 /** One published (or recalled, or estimated) energy, number and unit as printed. */
 export interface RegisterRow {

@@ -1,4 +1,9 @@
 import type { Register, Solvent } from "./Register.ts";
+
+/** A solvent by key or other spelling, upper and lower case alike. */
 export function findSolvent(register: Register, word: string): Solvent | undefined {
-  return register.solvents.find((s) => s.key === word || s.aliases.includes(word));
+  const folded = word.trim().toLowerCase();
+  return register.solvents.find((solvent) =>
+    [solvent.key, ...solvent.aliases].some((spelling) => spelling.toLowerCase() === folded),
+  );
 }

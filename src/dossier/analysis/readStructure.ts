@@ -3,7 +3,7 @@ import { chiralityOf } from "../../structure/chiralityOf.ts";
 import { findOpenCentres, type OpenStereo } from "../../structure/findOpenCentres.ts";
 import { findOpenDoubleBonds } from "../../structure/findOpenDoubleBonds.ts";
 import { findRings } from "../../structure/findRings.ts";
-import { mirrorImage, type Molecule, withSenses } from "../../structure/Molecule.ts";
+import { type Molecule, mirrorImage, withSenses } from "../../structure/Molecule.ts";
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type { Alert, Identity, Stereocentre, Structure } from "../Dossier.ts";
 import type { Services } from "./Services.ts";

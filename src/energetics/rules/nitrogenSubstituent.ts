@@ -23,7 +23,7 @@ export const nitrogenSubstituent: EnergyRule = {
         const { ring } = chair;
         const locant = ring.locants[ring.atoms.indexOf(group.ringAtom)]!;
         const lookup = (key: string) =>
-          nitrogenRow(context.register, { ...context, ring: ring.ringKey, locant, group: key });
+          nitrogenRow(context.register, { ...context, ring: ring.ringKey, group: key });
         const name = nameOf(group);
         const own = group.group === null ? undefined : lookup(group.group.key);
         const loan = similarGroups(context.register, group)
