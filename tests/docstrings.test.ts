@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { parse } from "yaml";
+import { readRegister } from "../src/site/readRegister.ts";
 import { sourceFiles } from "./sourceFiles.ts";
 
 /** Rooms whose functions compute physical quantities. */
@@ -63,9 +63,7 @@ describe("Docstrings of functions that compute", () => {
 
 describe("Source keys in docstrings", () => {
   test("stand in the register's bibliography", () => {
-    const known = new Set(
-      sourceFiles(["src/register/data"], /\.ya?ml$/).flatMap((file) => citationKeys(parse(file.text))),
-    );
+    const known = new Set(readRegister().citations.map((citation) => citation.key));
     const unknown = sourceFiles(["src"], /\.ts$/).flatMap((file) =>
       [...file.text.matchAll(/@see\s+\{?@?(?:link\s+)?([\w-]+)/g)]
         .filter(([, key]) => !known.has(key!))
@@ -75,18 +73,3 @@ describe("Source keys in docstrings", () => {
     expect(unknown).toEqual([]);
   });
 });
-
-/** Keys of records that carry a citation text, wherever they stand in the register's files. */
-function citationKeys(value: unknown): string[] {
-  if (Array.isArray(value)) return value.flatMap(citationKeys);
-  if (value === null || typeof value !== "object") return [];
-  return Object.entries(value).flatMap(([key, inner]) => {
-    const record = inner as { key?: unknown; text?: unknown; citation?: unknown } | null;
-    const cites =
-      record !== null &&
-      typeof record === "object" &&
-      (typeof record.text === "string" || typeof record.citation === "string");
-    const own = cites ? [typeof record.key === "string" ? record.key : key] : [];
-    return [...own, ...citationKeys(inner)];
-  });
-}

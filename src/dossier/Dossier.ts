@@ -62,7 +62,7 @@ export interface Conditions {
   /** For print, `_` marks a subscript: `CDCl_3`. */
   readonly solventLabel: string;
   readonly medium: MediumClass;
-  /** True where the author (or the series) gave it; false for a default. */
+  /** True where the author or the series names the solvent; false when a medium had to be assumed. */
   readonly stated: boolean;
 }
 

@@ -92,16 +92,14 @@ function sourcesOf(analysis: Analysis, services: Services): readonly SourceNote[
   });
 }
 
-/** Points into the SMILES itself where the character is known and the author wrote it as one plain value. */
+/** Points into the SMILES itself where the character is known. */
 function refusalDiagnostic(
   input: CompoundInput,
   code: string,
   message: string,
   position: number | null,
 ): Diagnostic {
-  const whole = input.place(["structure"]);
-  const at = position === null ? -1 : (whole.sourceLine?.indexOf(input.structure.smiles) ?? -1);
-  const place = at < 0 || position === null ? whole : { ...whole, column: at + position + 1, length: 1 };
+  const place = position === null ? input.place(["structure"]) : input.place(["structure"], position);
   return { code, severity: "error", place, message: `${message} Found "${input.structure.smiles}".` };
 }
 

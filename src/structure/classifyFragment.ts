@@ -54,8 +54,7 @@ const doubleTo = (molecule: Molecule, atom: Atom, others: readonly Atom[], ...el
 
 function carbonClass(molecule: Molecule, first: Atom, others: readonly Atom[]): string {
   if (first.aromatic) {
-    const ring = others.filter((other) => other.aromatic);
-    return ring.every((other) => other.element === "C") ? "aryl" : "heteroaryl";
+    return aromaticPart(molecule, first).every((atom) => atom.element === "C") ? "aryl" : "heteroaryl";
   }
   const triple = others.find((other) => bondBetween(molecule, first.index, other.index)!.order === 3);
   if (triple !== undefined) return triple.element === "N" ? "cyano" : "alkynyl";
@@ -69,6 +68,21 @@ function carbonClass(molecule: Molecule, first: Atom, others: readonly Atom[]): 
   if (others.some((other) => other.element === "F")) return "fluoroalkyl";
   const heavy = others.filter((other) => other.element !== "H").length;
   return heavy <= 1 ? "primary-alkyl" : heavy === 2 ? "secondary-alkyl" : "tertiary-alkyl";
+}
+
+/** The aromatic atoms joined to one without a break. */
+function aromaticPart(molecule: Molecule, start: Atom): readonly Atom[] {
+  const found = new Set([start.index]);
+  const queue = [start];
+  while (queue.length > 0) {
+    for (const neighbour of queue.pop()!.neighbours) {
+      const atom = molecule.atoms[neighbour]!;
+      if (!atom.aromatic || found.has(neighbour)) continue;
+      found.add(neighbour);
+      queue.push(atom);
+    }
+  }
+  return [...found].map((index) => molecule.atoms[index]!);
 }
 
 function oxygenClass(molecule: Molecule, first: Atom, others: readonly Atom[]): string {
@@ -85,16 +99,12 @@ function oxygenClass(molecule: Molecule, first: Atom, others: readonly Atom[]): 
 }
 
 function nitrogenClass(molecule: Molecule, first: Atom, others: readonly Atom[]): string {
-  if (first.charge > 0) {
-    return others.some((other) => other.element === "O") ? "nitro" : "ammonium";
-  }
-  if (
-    others.some(
-      (other) => other.element === "N" && bondBetween(molecule, first.index, other.index)!.order > 1,
-    )
-  ) {
-    return "azido";
-  }
+  const multiple = others.find((other) => bondBetween(molecule, first.index, other.index)!.order > 1);
+  if (multiple?.element === "N") return "azido";
+  if (multiple?.element === "O") return "nitro";
+  // Isocyanides, isocyanates and their kin resemble no amine.
+  if (multiple !== undefined) return "other";
+  if (first.charge > 0) return "ammonium";
   const acyl = others.some((other) => {
     const far = other.neighbours.map((index) => molecule.atoms[index]!);
     return (
