@@ -17,7 +17,7 @@ async function relationOf(smiles: string): Promise<string> {
   return relateChairs(read.molecule, sets[0]![0]!, sets[1]![0]!);
 }
 
-describe("The two chairs of a ring", () => {
+describe("The two chairs of a ring (common practice)", () => {
   // source: common practice, as in any stereochemistry textbook (Eliel, Wilen, Mander 1994, ch. 11, from memory).
   test.each([
     ["cyclohexane", "C1CCCCC1", "identical"],

@@ -46,7 +46,7 @@ function randomRing(random: () => number): string {
   return atoms.map((atom, i) => `${atom.open}${i === 0 || i === 5 ? "1" : ""}${atom.rest}`).join("");
 }
 
-describe("faces of ring groups against an independent reading", () => {
+describe("Faces of ring groups against an independent reading (source: RDKit, its own wedge assignment)", () => {
   // source: the depiction code of the RDKit library assigns solid and hashed wedges by itself (new stereo
   // perception, wedging after IUPAC 2006 recommendations); a wedge's side is read here from the drawing's
   // coordinates alone.

@@ -10,7 +10,7 @@ async function read(smiles: string) {
   return { toolkit, molecule: answer.molecule };
 }
 
-describe("Missing configurations are found", () => {
+describe("Missing configurations are found (common practice)", () => {
   // source: numbers of stereoisomers as in any stereochemistry textbook (common practice): 1,2-dimethylcyclohexane
   // has 3 (meso and a pair), 1,3 has 3, 1,4 has 2, 2-methylcyclohexanol 4, inositol 9.
   test.each([
@@ -43,7 +43,7 @@ describe("Missing configurations are found", () => {
   });
 });
 
-describe("Chirality of the substance on the time average", () => {
+describe("Chirality of the substance on the time average (common practice)", () => {
   // source: common practice.
   test.each([
     ["trans-1,4-dimethylcyclohexane", "C[C@H]1CC[C@H](C)CC1", "achiral"],
