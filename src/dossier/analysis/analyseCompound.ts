@@ -1,6 +1,7 @@
 import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import type { MediumClass } from "../../register/Register.ts";
 import { analyseRings } from "../../structure/analyseRings.ts";
+import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type {
   Alert,
   ChairRelation,
@@ -148,15 +149,10 @@ function membersOf(
     const result = analyseConformers(member.molecule, rings, context, request.temperature_K);
     const major = result?.conformers[0];
     if (major === undefined) return [];
-    const labels = [...services.toolkit.descriptors(member.molecule).atoms].sort(([a], [b]) => a - b);
     const configuration = rings.flatMap((ring) =>
       configurationOf(ring).map(({ locants: pair, relation }) => `${relation}-${pair.join(",")}`),
     );
-    const descriptors = labels.map(([atom, label]) => {
-      const ring = rings.find((entry) => entry.atoms.includes(atom));
-      const locant = ring === undefined ? `atom ${atom}` : `${ring.locants[ring.atoms.indexOf(atom)]}`;
-      return `${locant}${ring === undefined ? " " : ""}${label}`;
-    });
+    const descriptors = describeCentres(services.toolkit.descriptors(member.molecule).atoms, rings);
     return [
       {
         canonicalSmiles: member.canonicalSmiles,
@@ -169,4 +165,20 @@ function membersOf(
       },
     ];
   });
+}
+
+/** CIP descriptors with ring locants in their order (`1R`, `3S`), centres outside the rings after them by atom. */
+function describeCentres(
+  labels: ReadonlyMap<number, string>,
+  rings: readonly AnalysedRing[],
+): readonly string[] {
+  const inRings = rings.flatMap((ring) =>
+    [1, 2, 3, 4, 5, 6].flatMap((locant) => {
+      const label = labels.get(ring.atoms[ring.locants.indexOf(locant)]!);
+      return label === undefined ? [] : [`${locant}${"′".repeat(ring.index)}${label}`];
+    }),
+  );
+  const ringAtoms = new Set(rings.flatMap((ring) => ring.atoms));
+  const others = [...labels].filter(([atom]) => !ringAtoms.has(atom)).sort(([a], [b]) => a - b);
+  return [...inRings, ...others.map(([atom, label]) => `atom ${atom} ${label}`)];
 }
