@@ -87,7 +87,7 @@ function aromaticPart(molecule: Molecule, start: Atom): readonly Atom[] {
 
 function oxygenClass(molecule: Molecule, first: Atom, others: readonly Atom[]): string {
   const next = others[0];
-  if (next === undefined) return "hydroxyl";
+  if (next === undefined) return first.hydrogens > 0 ? "hydroxyl" : "oxo";
   if (next.element === "Si") return "silyloxy";
   if (next.element === "S" || next.element === "P") return "sulfonyloxy";
   if (next.aromatic) return "aryloxy";
