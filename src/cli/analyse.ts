@@ -1,8 +1,11 @@
-import { once } from "node:events";
-import { createInterface } from "node:readline";
+import type { Writable } from "node:stream";
 import { analyseLine } from "../dossier/analyseLine.ts";
 import { loadServices } from "../site/loadServices.ts";
 import { type Command, EXIT } from "./Command.ts";
+import { splitLines } from "./splitLines.ts";
+
+/** Characters kept of one line: more than any line that is accepted, so that a longer one is refused as such. */
+const LONGEST_LINE = 1_000_000;
 
 export const analyse: Command = {
   name: "analyse",
@@ -10,26 +13,37 @@ export const analyse: Command = {
   details:
     'Reads one JSON object a line, {"id": "x1", "smiles": "C[C@H]1CC[C@@H](O)CC1", "temperature_K": 298.15,\n' +
     '"solvent": "CDCl3"} (the last two optional), and writes one JSON object a line, in order. A bad line is answered\n' +
-    'with an error and does not stop the rest. It is the same analysis as the site\'s. "ringfolio schema analyse-input"\n' +
-    'and "ringfolio schema analyse-output" print the JSON Schema of both sides.',
+    "with an error and does not stop the rest; the exit code is 0 all the same. It is the same analysis as the site's.\n" +
+    '"ringfolio schema analyse-input" and "ringfolio schema analyse-output" print the JSON Schema of both sides.',
   options: [],
   run: async (_given, io) => {
     const services = await loadServices();
-    let broken = false;
-    io.output.on("error", () => {
-      broken = true;
-    });
-    const lines = createInterface({ input: io.input, crlfDelay: Number.POSITIVE_INFINITY });
-    for await (const line of lines) {
-      if (broken) break;
-      if (!io.output.write(`${analyseLine(line, services)}\n`) && !broken) {
-        await Promise.race([
-          once(io.output, "drain"),
-          once(io.output, "close"),
-          once(io.output, "error"),
-        ]).catch(() => {});
-      }
+    const writeLine = lineWriter(io.output);
+    for await (const line of splitLines(io.input, LONGEST_LINE)) {
+      if (!(await writeLine(analyseLine(line, services)))) break;
     }
     return EXIT.done;
   },
 };
+
+/** Writes lines no faster than they are read; the returned promise is false once nobody reads any more. */
+function lineWriter(output: Writable): (line: string) => Promise<boolean> {
+  let closed = false;
+  let wake = () => {};
+  const close = () => {
+    closed = true;
+    wake();
+  };
+  output.on("error", close).on("close", close);
+  output.on("drain", () => wake());
+  return async (line) => {
+    if (closed) return false;
+    const mayGoOn = output.write(`${line}\n`);
+    if (!mayGoOn && !closed) {
+      await new Promise<void>((resolve) => {
+        wake = resolve;
+      });
+    }
+    return !closed;
+  };
+}

@@ -1,3 +1,4 @@
+import path from "node:path";
 import { type Command, EXIT } from "./Command.ts";
 import { progress } from "./progress.ts";
 import { count, report } from "./report.ts";
@@ -14,20 +15,22 @@ export const build: Command = {
     { name: "output", value: "DIR", fallback: "_site", help: "folder to write" },
   ],
   run: async ({ options }, io) => {
-    const { buildSite, OutputRefused } = await import("../site/buildSite.ts");
+    const began = process.hrtime.bigint();
+    const output = options["output"]!;
+    const { buildSite } = await import("../site/buildSite.ts");
+    const { OutputRefused } = await import("../site/OutputRefused.ts");
     try {
-      const result = await buildSite({
-        content: options["content"]!,
-        output: options["output"]!,
-        onProgress: progress(io),
-      });
+      const result = await buildSite({ content: options["content"]!, output, onProgress: progress(io) });
       report(result.diagnostics, io);
       if (!result.ok) {
-        io.errors.write(`Nothing was published; ${options["output"]} is as it was.\n`);
+        io.errors.write(`Nothing was published; ${output} is as it was.\n`);
         return EXIT.contentErrors;
       }
+      // The time is of use to a person only, and would make two logs differ.
+      const seconds = Number(process.hrtime.bigint() - began) / 1e9;
+      const time = io.output.isTTY === true ? ` in ${seconds.toFixed(1)} s` : "";
       io.output.write(
-        `${count(result.dossiers, "dossier")}, ${count(result.pages, "file")}: ${options["output"]}/index.html\n`,
+        `${count(result.dossiers, "dossier")}, ${count(result.pages, "page")}${time}: ${path.join(output, "index.html")}\n`,
       );
       return EXIT.done;
     } catch (error) {

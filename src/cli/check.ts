@@ -12,7 +12,10 @@ export const check: Command = {
   run: async ({ options }, io) => {
     const { loadCollection } = await import("../site/loadCollection.ts");
     const { sitePages } = await import("../site/pages/sitePages.ts");
-    const collection = await loadCollection(options["content"]!, progress(io));
+    const shown = progress(io);
+    const collection = await loadCollection(options["content"]!, (done, total) =>
+      shown("analysed", done, total),
+    );
     const diagnostics = [...collection.diagnostics, ...sitePages(collection).diagnostics];
     const { errors, cautions } = report(diagnostics, io);
     const dossiers = collection.series.flatMap((series) => series.dossiers);

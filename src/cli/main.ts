@@ -1,4 +1,4 @@
-import { parseArgs } from "node:util";
+import { inspect, parseArgs } from "node:util";
 import { nearestWord } from "../diagnostics/nearestWord.ts";
 import { analyse } from "./analyse.ts";
 import { build } from "./build.ts";
@@ -21,7 +21,7 @@ export async function main(args: readonly string[], io: Io): Promise<number> {
   } catch (error) {
     const known = error instanceof Error ? error : new Error(String(error));
     if ((known as NodeJS.ErrnoException).code === "EPIPE") return EXIT.done;
-    io.errors.write(`ringfolio: ${debug ? known.stack : known.message}\n`);
+    io.errors.write(`ringfolio: ${debug ? inspect(known) : known.message}\n`);
     if (!debug) io.errors.write("Run again with --debug for the details.\n");
     return EXIT.unexpected;
   }
@@ -73,6 +73,8 @@ async function dispatch(words: readonly string[], io: Io): Promise<number> {
       : `"--${option}" is not an option of ${command.name}; it has ${allowed.map((name) => `--${name}`).join(", ") || "none"}.`;
     return wrongUse(io, message, allowed.includes(option) ? "" : option, allowed, "--");
   }
+  const empty = allowed.find((name) => values[name] === "");
+  if (empty !== undefined) return wrongUse(io, `The option --${empty} needs a value.`, "", []);
   const { argument } = command;
   if (positionals.length > (argument === undefined ? 0 : 1)) {
     return wrongUse(io, `${command.name} does not take "${positionals.at(-1)}".`, "", []);

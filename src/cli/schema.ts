@@ -4,11 +4,11 @@ export const schema: Command = {
   name: "schema",
   summary: "print the JSON Schema of content files or of the batch command",
   details:
-    "Prints JSON Schema (2020-12): of the front matter of content files, for editors that check and complete YAML, or\n" +
-    "of the lines that analyse reads and writes.",
+    "Prints JSON Schema (2020-12): of the front matter of a compound, a series or the site, or of all three in one, for\n" +
+    "editors that check and complete YAML; or of the lines that analyse reads and writes.",
   argument: {
     name: "what",
-    allowed: ["content", "compound", "series", "site", "analyse-input", "analyse-output"],
+    allowed: ["compound", "series", "site", "all", "analyse-input", "analyse-output"],
     fallback: "compound",
   },
   options: [],
@@ -25,6 +25,6 @@ async function schemaOf(what: string): Promise<unknown> {
   }
   const { contentJsonSchema } = await import("../dossier/content/contentJsonSchema.ts");
   const { readRegister } = await import("../site/readRegister.ts");
-  const all = contentJsonSchema(readRegister());
-  return what === "content" ? all : { ...all, $ref: `#/$defs/${what}`, oneOf: undefined, anyOf: undefined };
+  const { anyOf, ...rest } = contentJsonSchema(readRegister());
+  return what === "all" ? { ...rest, anyOf } : { ...rest, $ref: `#/$defs/${what}` };
 }

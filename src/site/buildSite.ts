@@ -1,42 +1,47 @@
-import { existsSync, mkdirSync, mkdtempSync, readdirSync, renameSync, rmSync, writeFileSync } from "node:fs";
+import {
+  chmodSync,
+  existsSync,
+  mkdirSync,
+  mkdtempSync,
+  renameSync,
+  rmSync,
+  statSync,
+  writeFileSync,
+} from "node:fs";
 import path from "node:path";
 import type { Diagnostic } from "../diagnostics/Diagnostic.ts";
-import type { Collection } from "../dossier/Collection.ts";
+import { checkOutput, SITE_MARK } from "./checkOutput.ts";
+import { OutputRefused } from "./OutputRefused.ts";
+import type { FoundSite, Progress } from "./plugin.ts";
 import { startEleventy } from "./startEleventy.ts";
-
-/** Marks a folder as written by this program, so that it may be replaced. */
-export const SITE_MARK = ".ringfolio-site";
 
 export type BuildResult =
   | {
       readonly ok: true;
       readonly diagnostics: readonly Diagnostic[];
+      /** Numbers of dossiers and of HTML pages. */
       readonly dossiers: number;
       readonly pages: number;
     }
   | { readonly ok: false; readonly diagnostics: readonly Diagnostic[] };
 
-/** A folder that must not be replaced, said in words for the person who named it. */
-export class OutputRefused extends Error {}
+/** Faults of the place that was asked for rather than of the program. */
+const FAULTS_OF_THE_PLACE = ["EACCES", "EPERM", "EROFS", "EBUSY", "ENOTDIR", "EXDEV", "ENOSPC"];
 
 /**
  * Writes the site into a new folder beside `output` and puts it in its place only when everything is well. With any
  * error, whatever stood at `output` before is left byte for byte as it was.
- * @throws OutputRefused when `output` is not a folder that this program may replace.
+ * @throws OutputRefused when `output` is not a folder that this program may replace or can write.
  */
 export async function buildSite(options: {
   readonly content: string;
   readonly output: string;
-  readonly onProgress?: (done: number, total: number) => void;
+  readonly onProgress?: Progress;
 }): Promise<BuildResult> {
-  const output = path.resolve(options.output);
-  const content = path.resolve(options.content);
-  checkOutput(output, content);
-  mkdirSync(path.dirname(output), { recursive: true });
-  const fresh = mkdtempSync(path.join(path.dirname(output), ".build-"));
-  const leftovers = [fresh];
+  const { folder, foreign } = checkOutput(options.output, options.content);
+  const leftovers: string[] = [];
   const clean = () => {
-    for (const folder of leftovers) rmSync(folder, { recursive: true, force: true });
+    for (const left of leftovers) rmSync(left, { recursive: true, force: true });
   };
   const interrupted = () => {
     clean();
@@ -45,30 +50,24 @@ export async function buildSite(options: {
   process.once("SIGINT", interrupted);
   process.once("SIGTERM", interrupted);
   try {
-    let diagnostics: readonly Diagnostic[] = [];
-    let collection: Collection | undefined;
-    let pages = 0;
-    const { eleventy, input } = startEleventy(fresh, "build", {
-      content: options.content,
-      onDiagnostics: (found, analysed) => {
-        diagnostics = found;
-        collection = analysed;
-        // Nothing is rendered when the site will not be published.
-        return found.every(({ severity }) => severity !== "error");
-      },
-      finish: (text) => {
-        pages += 1;
-        return text;
-      },
-      ...(options.onProgress === undefined ? {} : { onProgress: options.onProgress }),
-    });
-    leftovers.push(input);
-    await eleventy.write();
-    if (diagnostics.some(({ severity }) => severity === "error")) return { ok: false, diagnostics };
+    const fresh = freshFolder(folder, leftovers);
+    const found: FoundSite = await write(fresh, options, foreign, leftovers);
+    const { diagnostics, collection, pages } = found;
+    if (hasErrors(diagnostics)) return { ok: false, diagnostics };
+    // Mistakes in the content are told first, so that one run tells as much as it can.
+    if (foreign !== null) throw new OutputRefused(foreign);
     writeFileSync(path.join(fresh, SITE_MARK), "Written by ringfolio; replaced by its next build.\n");
-    swap(fresh, output);
-    const dossiers = collection?.series.reduce((sum, series) => sum + series.dossiers.length, 0) ?? 0;
-    return { ok: true, diagnostics, dossiers, pages };
+    swap(fresh, folder);
+    return {
+      ok: true,
+      diagnostics,
+      dossiers: collection.series.reduce((sum, series) => sum + series.dossiers.length, 0),
+      pages: pages.filter((page) => page.path.endsWith(".html")).length,
+    };
+  } catch (error) {
+    const code = (error as NodeJS.ErrnoException).code ?? "";
+    if (!FAULTS_OF_THE_PLACE.includes(code)) throw error;
+    throw new OutputRefused(`The site cannot be written to ${options.output}: ${(error as Error).message}.`);
   } finally {
     process.removeListener("SIGINT", interrupted);
     process.removeListener("SIGTERM", interrupted);
@@ -76,25 +75,58 @@ export async function buildSite(options: {
   }
 }
 
-function checkOutput(output: string, content: string): void {
-  const inside = (inner: string, outer: string) => inner === outer || inner.startsWith(outer + path.sep);
-  if (inside(content, output))
-    throw new OutputRefused(`The output folder ${output} holds the content folder; choose another.`);
-  if (inside(output, content))
-    throw new OutputRefused(`The output folder ${output} lies inside the content folder; choose another.`);
-  if (!existsSync(output)) return;
-  const names = readdirSync(output);
-  if (names.length > 0 && !names.includes(SITE_MARK)) {
-    throw new OutputRefused(
-      `The folder ${output} is not empty and was not written by ringfolio; choose another or empty it yourself.`,
-    );
-  }
+/** Runs Eleventy into `fresh`. Nothing is rendered when the site will not be published. */
+async function write(
+  fresh: string,
+  options: { readonly content: string; readonly onProgress?: Progress },
+  foreign: string | null,
+  leftovers: string[],
+): Promise<FoundSite> {
+  let found: FoundSite | undefined;
+  const { eleventy, input } = startEleventy(
+    fresh,
+    "build",
+    { content: options.content },
+    {
+      choosePages: (site) => {
+        found = site;
+        return hasErrors(site.diagnostics) || foreign !== null ? [] : site.pages;
+      },
+      ...(options.onProgress === undefined ? {} : { onProgress: options.onProgress }),
+    },
+  );
+  leftovers.push(input);
+  await eleventy.write();
+  if (found === undefined) throw new Error("Eleventy finished without asking for pages");
+  return found;
+}
+
+function hasErrors(diagnostics: readonly Diagnostic[]): boolean {
+  return diagnostics.some(({ severity }) => severity === "error");
+}
+
+/** A new folder beside the output: on the same disk, so that it can be put in place by renaming. */
+function freshFolder(folder: string, leftovers: string[]): string {
+  let beside = path.dirname(folder);
+  while (!existsSync(beside)) beside = path.dirname(beside);
+  const fresh = mkdtempSync(path.join(beside, ".build-"));
+  leftovers.push(fresh);
+  return fresh;
 }
 
 /** Two renames: a reader may miss the folder for an instant and never sees half of it. */
-function swap(fresh: string, output: string): void {
+function swap(fresh: string, folder: string): void {
   const old = `${fresh}.old`;
-  if (existsSync(output)) renameSync(output, old);
-  renameSync(fresh, output);
+  const replaces = existsSync(folder);
+  mkdirSync(path.dirname(folder), { recursive: true });
+  // A temporary folder is closed to other users; a site is as open as the one before it, or as any new folder.
+  chmodSync(fresh, replaces ? statSync(folder).mode : 0o777 & ~process.umask());
+  if (replaces) renameSync(folder, old);
+  try {
+    renameSync(fresh, folder);
+  } catch (error) {
+    if (replaces) renameSync(old, folder);
+    throw error;
+  }
   rmSync(old, { recursive: true, force: true });
 }

@@ -2,17 +2,24 @@ import { mkdtempSync } from "node:fs";
 import os from "node:os";
 import path from "node:path";
 import Eleventy, { type EleventyConfig } from "@11ty/eleventy";
-import { type RingfolioOptions, ringfolioPlugin } from "./plugin.ts";
+import { type RingfolioOptions, ringfolioPlugin, type SiteHooks } from "./plugin.ts";
+
+/** Every language that Eleventy or gray-matter knows for front matter; none is understood here. */
+const FRONT_MATTER = [
+  ...["js", "javascript", "jsLegacy", "node", "coffee", "coffeescript", "cson"],
+  ...["json", "yaml", "toml"],
+];
 
 /**
  * Eleventy for the program's own commands: its input is an empty folder, no configuration file is read, and no
- * front matter of any kind is understood, so that the plugin's pages are all there is.
+ * front matter of any kind is understood, so that the plugin's pages are all there is. It prints nothing itself.
  * @returns the instance and the empty folder, to be removed afterwards.
  */
 export function startEleventy(
   output: string,
   runMode: "build" | "serve",
   options: RingfolioOptions,
+  hooks: SiteHooks,
   configure: (config: EleventyConfig) => void = () => {},
 ): { readonly eleventy: Eleventy; readonly input: string } {
   const input = mkdtempSync(path.join(os.tmpdir(), "ringfolio-input-"));
@@ -31,16 +38,12 @@ export function startEleventy(
         throw new Error("front matter is not read here");
       };
       config.setFrontMatterParsingOptions({
-        engines: Object.fromEntries(
-          ["js", "javascript", "jsLegacy", "json", "yaml", "toml", "coffee", "coffeescript", "node"].map(
-            (name) => [name, refuse],
-          ),
-        ),
+        engines: Object.fromEntries(FRONT_MATTER.map((name) => [name, refuse])),
       });
-      ringfolioPlugin(config, options);
+      ringfolioPlugin(config, options, hooks);
       configure(config);
     },
   });
-  if (runMode === "build") eleventy.disableLogger();
+  eleventy.disableLogger();
   return { eleventy, input };
 }
