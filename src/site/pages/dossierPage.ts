@@ -1,0 +1,153 @@
+import { dossierBody, type Section } from "../../../templates/dossier.ts";
+import type { Series } from "../../dossier/Collection.ts";
+import type { Dossier } from "../../dossier/Dossier.ts";
+import type { FigureName } from "../../drawing/figures.ts";
+import { escapeHtml } from "../../quantity/escapeHtml.ts";
+import { labelHtml } from "../../quantity/labelHtml.ts";
+import { DossierParts } from "./DossierParts.ts";
+import { dossierValue } from "./dossierValue.ts";
+import { PagePlan } from "./PagePlan.ts";
+import type { RegisterPlaces } from "./registerPlaces.ts";
+import { renderProse } from "./renderProse.ts";
+
+/** The body of a dossier page. Parts that the prose places are not repeated below it. */
+export function dossierPage(dossier: Dossier, series: Series, places: RegisterPlaces): string {
+  const plan = new PagePlan();
+  const parts = new DossierParts(dossier, plan, places);
+  const wanted = new Set<string>();
+  // A first pass finds what the prose places, so that the lead figure is not drawn twice.
+  renderProse(dossier.prose.markdown, ({ kind, name }) => {
+    wanted.add(`${kind}/${name}`);
+    return "";
+  });
+  const lead = wanted.has("figure/equilibrium") ? "" : (parts.figure("equilibrium") ?? "");
+  const prose = renderProse(dossier.prose.markdown, ({ kind, name, options }) => {
+    switch (kind) {
+      case "figure":
+        return (
+          parts.figure(name as FigureName, options["conformer"]) ??
+          missing("This figure cannot be drawn: the dossier has no such conformer.")
+        );
+      case "table":
+        return parts.table(name);
+      case "derivation":
+        return parts.derivation() ?? missing("There is no equilibrium to derive.");
+      case "value":
+        return `<span class="value">${labelHtml(dossierValue(dossier, name))}</span>`;
+      default:
+        return null;
+    }
+  }).html;
+  return dossierBody({
+    code: dossier.code,
+    name: escapeHtml(dossier.name),
+    seriesTitle: series.title,
+    seriesHref: "../index.html",
+    status: statusOf(dossier),
+    conclusion: labelHtml(dossier.conclusion),
+    stops: dossier.alerts.filter(({ severity }) => severity === "stop").map(({ message }) => message),
+    lead,
+    prose,
+    sections: sectionsOf(dossier, parts),
+  }).markup;
+}
+
+function missing(text: string): string {
+  return `<p class="missing">${escapeHtml(text)}</p>`;
+}
+
+function statusOf(dossier: Dossier): string {
+  const reviewed = dossier.review.some(({ as }) => as !== "author");
+  const entries = dossier.review.map(
+    ({ by, on, as, meaning }) => `${as}: ${by}, ${on}${meaning === null ? "" : ` (${meaning})`}`,
+  );
+  return `${reviewed ? "Signed" : "Unsigned draft"}${entries.length === 0 ? "; no author or reviewer is recorded" : `; ${entries.join("; ")}`}.`;
+}
+
+function sectionsOf(dossier: Dossier, parts: DossierParts): readonly Section[] {
+  const sections: Section[] = [];
+  const add = (id: string, title: string, content: readonly (string | null)[]) => {
+    const text = content.filter((piece) => piece !== null && piece !== "").join("\n");
+    if (text !== "") sections.push({ id, title, content: text });
+  };
+  const once = (key: string, make: () => string | null) => (parts.has(key) ? null : make());
+  const analysed = dossier.conformers.length > 0;
+  add("identity", "Identity", [
+    once("figure/wedge", () => parts.figure("wedge")),
+    once("table/identity", () => parts.table("identity")),
+    dossier.identity.stereocentres.length > 0 ? parts.table("stereocentres") : null,
+  ]);
+  if (analysed) {
+    add("conformers", "Conformers", [parts.table("conformers")]);
+    add("energies", "Energies", [once("table/energies", () => parts.table("energies"))]);
+    add("derivation", "From contributions to populations", [
+      once("derivation/equilibrium", () => parts.derivation()),
+    ]);
+    add("temperature", "Population against temperature", [
+      once("figure/temperature", () => parts.figure("temperature")),
+      once("table/temperature", () => parts.table("temperature")),
+    ]);
+  }
+  if (dossier.members.length > 0)
+    add("members", "Stereoisomers that the structure may stand for", [parts.table("members")]);
+  add("evidence", "Evidence", [
+    dossier.evidence.length === 0
+      ? "<p>No evidence is recorded.</p>"
+      : "<p>As recorded by the author; not yet compared with the calculation.</p>",
+    dossier.evidence.length === 0 ? null : once("table/evidence", () => parts.table("evidence")),
+  ]);
+  add("claim", "Claim", [claimOf(dossier)]);
+  add("alerts", "Checks", [alertsOf(dossier)]);
+  add("sources", "Sources", [
+    dossier.sources.length === 0 ? null : once("table/sources", () => parts.table("sources")),
+  ]);
+  add("provenance", "Provenance", [provenanceOf(dossier)]);
+  add("downloads", "Downloads", [downloadsOf(dossier)]);
+  return sections;
+}
+
+function claimOf(dossier: Dossier): string {
+  const { claim } = dossier;
+  if (claim === null) return "<p>No claim is recorded.</p>";
+  const basis: Record<string, string> = {
+    rm: "absolute configuration by comparison with a reference molecule of known configuration",
+    ad: "absolute configuration by anomalous dispersion",
+    rmad: "absolute configuration by reference molecule and anomalous dispersion",
+    syn: "relative or absolute configuration by synthesis",
+    unk: "absolute configuration unknown, arbitrary choice",
+  };
+  const rows = [
+    claim.configuration === null ? null : `<dt>Configuration</dt><dd>${escapeHtml(claim.configuration)}</dd>`,
+    claim.basis === null
+      ? null
+      : `<dt>Basis</dt><dd>${escapeHtml(claim.basis)}: ${escapeHtml(basis[claim.basis] ?? "")}</dd>`,
+    claim.statement === null ? null : `<dt>Statement</dt><dd>${escapeHtml(claim.statement)}</dd>`,
+  ].filter((row) => row !== null);
+  return `<dl class="facts">${rows.join("")}</dl>`;
+}
+
+function alertsOf(dossier: Dossier): string {
+  if (dossier.alerts.length === 0) return "<p>Nothing is open.</p>";
+  const items = dossier.alerts.map(
+    ({ severity, message, code }) =>
+      `<li class="alert alert-${severity}"><strong>${severity[0]!.toUpperCase()}${severity.slice(1)}.</strong> ${escapeHtml(message)} <code>${escapeHtml(code)}</code></li>`,
+  );
+  return `<ul class="alerts">${items.join("")}</ul>`;
+}
+
+function provenanceOf(dossier: Dossier): string {
+  const rows: readonly (readonly [string, string])[] = [
+    [
+      "Program",
+      `${dossier.program.name} ${dossier.program.version}, record version ${dossier.schemaVersion}`,
+    ],
+    ["Register", `${dossier.register.version}, SHA-256 ${dossier.register.sha256}`],
+    ["Input", `${dossier.input.file}, SHA-256 ${dossier.input.sha256}`],
+    ["Result", `SHA-256 ${dossier.resultSha256}`],
+  ];
+  return `<dl class="facts digests">${rows.map(([term, text]) => `<dt>${term}</dt><dd>${escapeHtml(text)}</dd>`).join("")}</dl>`;
+}
+
+function downloadsOf(dossier: Dossier): string {
+  return `<p><a href="${dossier.slug}.json" download>The whole record (JSON)</a>. Figures and tables have their own links above.</p>`;
+}

@@ -1,0 +1,49 @@
+import type { Dossier } from "../../dossier/Dossier.ts";
+import { formatEnergy } from "../../quantity/formatEnergy.ts";
+import { formatInterval } from "../../quantity/formatInterval.ts";
+import { formatK } from "../../quantity/formatK.ts";
+import { formatPopulation } from "../../quantity/formatPopulation.ts";
+import { formatTemperature } from "../../quantity/formatTemperature.ts";
+
+/** The words a `:value[…]` directive stands for, label markup allowed; says so when there is none. */
+export function dossierValue(dossier: Dossier, name: string): string {
+  const [major, minor] = dossier.conformers;
+  const equilibrium = dossier.equilibria[0];
+  const missing = "not available";
+  const percent = ([low, high]: readonly [number, number]) =>
+    formatInterval([Math.round(low * 1000) / 10, Math.round(high * 1000) / 10], "%");
+  switch (name) {
+    case "name":
+      return dossier.name;
+    case "code":
+      return dossier.code;
+    case "temperature":
+      return formatTemperature(dossier.conditions.temperature_K);
+    case "solvent":
+      return dossier.conditions.stated ? dossier.conditions.solventLabel : "not stated";
+    case "formula":
+      return dossier.identity.formula.replace(/(\d+)/g, (digits) => digits.replace(/\d/g, "_$&"));
+    case "population.major":
+      return major === undefined ? missing : formatPopulation(major.population, major.population95);
+    case "population.minor":
+      return minor === undefined ? missing : formatPopulation(minor.population, minor.population95);
+    case "interval.major":
+      return major === undefined ? missing : percent(major.population95);
+    case "interval.minor":
+      return minor === undefined ? missing : percent(minor.population95);
+    case "deltaG":
+      return equilibrium === undefined
+        ? missing
+        : formatEnergy(equilibrium.deltaG_kJ_mol, equilibrium.u_kJ_mol);
+    case "K":
+      return equilibrium === undefined ? missing : formatK(equilibrium.K, equilibrium.K95);
+    case "label.major":
+      return major?.label ?? missing;
+    case "label.minor":
+      return minor?.label ?? missing;
+    case "relation":
+      return dossier.relation ?? "none";
+    default:
+      throw new RangeError(`no value is called ${name}`);
+  }
+}

@@ -1,0 +1,58 @@
+import { articleBody } from "../../../templates/article.ts";
+import type { Collection } from "../../dossier/Collection.ts";
+import { registerTables } from "../../tables/builders/registerTables.ts";
+import { registerAnchor } from "../../tables/registerAnchor.ts";
+import { renderTable } from "../../tables/renderTable.ts";
+import { standingKey } from "../../tables/standingKey.ts";
+import type { TableModel } from "../../tables/TableModel.ts";
+
+/** The body of the register page: every parameter, its source and standing, and the dossiers that rest on it. */
+export function registerPage(collection: Collection): string {
+  const uses = usesByAnchor(collection);
+  const sections = registerTables(collection.register).map((model) => ({
+    id: `kind-${model.id}`,
+    title: model.caption,
+    content: `<div class="wide">${renderTable(withUses(model, uses), {
+      sourceHref: (key) => `../references/index.html#${registerAnchor(key)}`,
+    })}</div>`,
+  }));
+  return articleBody({
+    title: "Parameter register",
+    intro:
+      `<p>Version ${collection.register.version}. Numbers and units stand as printed in their sources; each row keeps its uncertainty, medium, temperature, source and standing. Estimates and values from memory await confirmation.</p>` +
+      `<p class="digests">SHA-256 ${collection.register.sha256}</p>${standingKey()}`,
+    sections,
+  }).markup;
+}
+
+/** Codes of the dossiers that use a row, by the row's anchor. */
+function usesByAnchor(collection: Collection): ReadonlyMap<string, readonly string[]> {
+  const uses = new Map<string, string[]>();
+  for (const series of collection.series) {
+    for (const dossier of series.dossiers) {
+      const rows = new Set(
+        dossier.conformers.flatMap(({ contributions }) =>
+          contributions.flatMap(({ terms }) => terms.map(({ row }) => row)),
+        ),
+      );
+      for (const row of rows) {
+        const anchor = registerAnchor(row);
+        uses.set(anchor, [...(uses.get(anchor) ?? []), dossier.code]);
+      }
+    }
+  }
+  return uses;
+}
+
+function withUses(model: TableModel, uses: ReadonlyMap<string, readonly string[]>): TableModel {
+  const used = model.rows.some((row) => row.id !== undefined && uses.has(row.id));
+  if (!used) return model;
+  return {
+    ...model,
+    columns: [...model.columns, { key: "used-by", title: "Used by", align: "left" }],
+    rows: model.rows.map((row) => ({
+      ...row,
+      cells: [...row.cells, { text: row.id === undefined ? "" : (uses.get(row.id)?.join(", ") ?? "") }],
+    })),
+  };
+}
