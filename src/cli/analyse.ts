@@ -1,6 +1,4 @@
 import type { Writable } from "node:stream";
-import { analyseLine } from "../dossier/analyseLine.ts";
-import { loadServices } from "../site/loadServices.ts";
 import { type Command, EXIT } from "./Command.ts";
 import { splitLines } from "./splitLines.ts";
 
@@ -17,6 +15,8 @@ export const analyse: Command = {
     '"ringfolio schema analyse-input" and "ringfolio schema analyse-output" print the JSON Schema of both sides.',
   options: [],
   run: async (_given, io) => {
+    const { loadServices } = await import("../site/loadServices.ts");
+    const { analyseLine } = await import("../dossier/analyseLine.ts");
     const services = await loadServices();
     const writeLine = lineWriter(io.output);
     for await (const line of splitLines(io.input, LONGEST_LINE)) {

@@ -13,7 +13,9 @@ export function loadServices(): Promise<Services> {
 }
 
 async function load(): Promise<Services> {
-  const toolkit = await loadToolkit();
+  // The library compiles in the background while the register is read.
+  const loading = loadToolkit();
   const register = readRegister();
+  const toolkit = await loading;
   return { register, toolkit, groups: groupIndex(register, toolkit), program: programVersion() };
 }
