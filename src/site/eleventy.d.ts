@@ -7,6 +7,7 @@ declare module "@11ty/eleventy" {
     addPassthroughCopy(paths: Record<string, string>): void;
     addWatchTarget(path: string): void;
     addPlugin(plugin: unknown, options?: unknown): void | Promise<void>;
+    addTemplateFormats(format: string): void;
     setTemplateFormats(formats: readonly string[]): void;
     setDataFileSuffixes(suffixes: readonly string[]): void;
     setUseGitIgnore(use: boolean): void;

@@ -78,6 +78,8 @@ export function ringfolioPlugin(
     }
   });
 
+  // A project that lists its formats would otherwise leave the plugin's own template out.
+  config.addTemplateFormats("11ty.js");
   config.addGlobalData("ringfolioPages", () => pages);
   config.addTemplate(
     "ringfolio.11ty.js",
