@@ -66,7 +66,12 @@ export function analyseCompound(
   const read = readStructure(request.smiles, request.ringLocants, services);
   if (!read.ok) return read;
   const structure = read.result;
-  const rings = structure.rings.map(describeRing);
+  const open = new Set(
+    structure.molecule === null
+      ? structure.identity.stereocentres.flatMap(({ atom, descriptor }) => (descriptor === "unspecified" ? [atom] : []))
+      : [],
+  );
+  const rings = structure.rings.map((ring) => describeRing(ring, open));
   const alerts: Alert[] = [...structure.alerts];
   if (!conditions.stated) {
     alerts.push({
@@ -91,9 +96,9 @@ export function analyseCompound(
   if (refusal !== null) alerts.push({ code: refusal.code, severity: "stop", message: refusal.message });
   if (result !== null) alerts.push(...conformerAlerts(result, structure.rings, context));
 
-  const open = result === null && refusal === null;
+  const undecided = result === null && refusal === null;
   const members =
-    open && request.enumerateStereoisomers ? membersOf(structure, context, request, services) : [];
+    undecided && request.enumerateStereoisomers ? membersOf(structure, context, request, services) : [];
   const order = ["stop", "caution", "note"];
   return {
     ok: true,

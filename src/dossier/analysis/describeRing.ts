@@ -1,8 +1,11 @@
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type { Ring } from "../Dossier.ts";
 
-/** A ring as the Dossier records it. */
-export function describeRing(ring: AnalysedRing): Ring {
+/**
+ * A ring as the Dossier records it.
+ * @param open - atoms whose configuration is not decided: their groups have no face and no cis/trans relation.
+ */
+export function describeRing(ring: AnalysedRing, open: ReadonlySet<number> = new Set()): Ring {
   const locant = (atom: number) => `${ring.locants[ring.atoms.indexOf(atom)]}${"′".repeat(ring.index)}`;
   return {
     index: ring.index,
@@ -16,21 +19,25 @@ export function describeRing(ring: AnalysedRing): Ring {
         ringAtom: group.ringAtom,
         atom: group.atom,
         locant: locant(group.ringAtom),
-        face: site.faces === "free" ? null : site.up === group.atom ? "up" : "down",
+        face: site.faces === "free" || open.has(group.ringAtom) ? null : site.up === group.atom ? "up" : "down",
         group: group.group?.key ?? null,
         label: group.label,
         labelReversed: group.labelReversed,
       };
     }),
-    configuration: configurationOf(ring),
+    configuration: configurationOf(ring, open),
   };
 }
 
 /** cis/trans of every pair of ring atoms that carry one lasting group each. */
-export function configurationOf(ring: AnalysedRing): Ring["configuration"] {
+export function configurationOf(
+  ring: AnalysedRing,
+  open: ReadonlySet<number> = new Set(),
+): Ring["configuration"] {
   const single = ring.substituents.filter(
     (group) =>
       !ring.inverting.includes(group.ringAtom) &&
+      !open.has(group.ringAtom) &&
       ring.substituents.filter((other) => other.ringAtom === group.ringAtom).length === 1,
   );
   const face = (group: (typeof single)[number]) =>
