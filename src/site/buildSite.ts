@@ -38,7 +38,6 @@ export async function buildSite(options: {
   readonly output: string;
   readonly onProgress?: Progress;
 }): Promise<BuildResult> {
-  const { folder, foreign } = checkOutput(options.output, options.content);
   const leftovers: string[] = [];
   const clean = () => {
     for (const left of leftovers) rmSync(left, { recursive: true, force: true });
@@ -50,6 +49,7 @@ export async function buildSite(options: {
   process.once("SIGINT", interrupted);
   process.once("SIGTERM", interrupted);
   try {
+    const { folder, foreign } = checkOutput(options.output, options.content);
     const fresh = freshFolder(folder, leftovers);
     const found: FoundSite = await write(fresh, options, foreign, leftovers);
     const { diagnostics, collection, pages } = found;
