@@ -3,8 +3,8 @@ import { renderTex } from "../../derivation/renderTex.ts";
 import { ENERGY_RULES } from "../../energetics/rules/index.ts";
 import { escapeHtml } from "../../quantity/escapeHtml.ts";
 
-const display = (tex: string) =>
-  `<div class="math-scroll" role="region" tabindex="0" aria-label="Formula">${renderTex(tex, { display: true })}</div>`;
+const display = (what: string, tex: string) =>
+  `<div class="math-scroll" role="region" tabindex="0" aria-label="Formula: ${what}">${renderTex(tex, { display: true })}</div>`;
 
 /** The body of the methods page: plain words that say what the program does, in the order in which it does it. */
 export function methodsPage(): string {
@@ -45,13 +45,14 @@ export function methodsPage(): string {
         title: "Temperature",
         content:
           "<p>A row keeps its value at its own temperature. Where an entropy difference is published it gives the slope; elsewhere the slope is zero with 1 cal/(mol K) of doubt, so that intervals widen away from the temperature of the measurement. Rows that print no temperature are taken at 298.15 K.</p>" +
-          display("G(T)=G(T_0)-\\Delta S\\,(T-T_0)"),
+          display("energy at another temperature", "G(T)=G(T_0)-\\Delta S\\,(T-T_0)"),
       },
       {
         id: "populations",
         title: "Populations and intervals",
         content:
           display(
+            "population and equilibrium constant",
             "p_i=\\frac{e^{-G_i/RT}}{\\sum_k e^{-G_k/RT}}\\qquad K=e^{-\\Delta G^\\circ/RT}\\qquad R=8.314\\,462\\,618\\ \\mathrm{J\\,mol^{-1}\\,K^{-1}}",
           ) +
           "<p>Register rows are independent of each other; a row used in both conformers moves both, so factors are subtracted before they are squared. Intervals are 95 %, from 1.96 standard uncertainties. For two conformers the ends of the interval of ΔG° are transformed; for more, the interval of logit p is propagated to first order and transformed back. When the interval of ΔG° contains zero the dossier says that the major conformer is unresolved. Chairs that are equal by symmetry hold exactly equal shares and carry no uncertainty. 1 kcal = 4.184 kJ exactly.</p>",
