@@ -45,7 +45,7 @@ export async function serveSite(options: ServeOptions): Promise<RunningServer> {
       },
       finish: (text, page) => {
         memory.keep(page.path, text);
-        return page.path.endsWith(".html") ? withProblemBanner(text, problems) : text;
+        return page.path.endsWith(".html") ? allowReload(withProblemBanner(text, problems)) : text;
       },
       onFailure: (failure) => {
         options.onFailure(failure);
@@ -60,6 +60,7 @@ export async function serveSite(options: ServeOptions): Promise<RunningServer> {
       config.setServerOptions({
         showAllHosts: false,
         domDiff: false,
+        messageOnStart: () => false,
         middleware: [refuseOtherMachines],
         ready: (server: { getServerUrl(host: string): string }) => {
           url = server.getServerUrl("localhost");
@@ -110,6 +111,11 @@ class LastGoodPages {
     const home = { path: "index.html", render: () => problemPage("There is no site yet", "") };
     return [...pages, ...old, ...(hasHome ? [] : [home])];
   }
+}
+
+/** Pages of the site may connect to nothing; while served they listen to the server for the next build. */
+function allowReload(text: string): string {
+  return text.replace(/(content="default-src (?:'|&#39;)none(?:'|&#39;);)/, "$1 connect-src 'self';");
 }
 
 /** A compound that is gone takes its pages with it. */

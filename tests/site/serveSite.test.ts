@@ -70,6 +70,8 @@ describe("ringfolio serve", { timeout: 120_000 }, () => {
 
   test("shows the site, follows edits, tells of errors on the pages, and recovers", async () => {
     expect(await text("index.html")).toContain("Small project");
+    // The reload client talks to the server; the policy of the published pages would forbid it.
+    expect(await text("index.html")).toMatch(/Content-Security-Policy" content="[^"]*connect-src 'self'/);
     expect(await text(page("tl-01"))).toContain("methylcyclohexane");
 
     compound("tl-01", "1-methylcyclohexane", "CC1CCCCC1");
