@@ -4,16 +4,24 @@ import { registerTables } from "../../tables/builders/registerTables.ts";
 import { registerAnchor } from "../../tables/registerAnchor.ts";
 import { renderTable } from "../../tables/renderTable.ts";
 import { standingKey } from "../../tables/standingKey.ts";
-import type { TableModel } from "../../tables/TableModel.ts";
+import type { Cell, TableModel } from "../../tables/TableModel.ts";
 
 /** The body of the register page: every parameter, its source and standing, and the dossiers that rest on it. */
 export function registerPage(collection: Collection): string {
   const uses = usesByAnchor(collection);
+  const dossiers = new Map(
+    collection.series.flatMap((series) =>
+      series.dossiers.map(
+        (dossier) => [dossier.code, `../series/${series.slug}/${dossier.slug}/index.html`] as const,
+      ),
+    ),
+  );
   const sections = registerTables(collection.register).map((model) => ({
     id: `kind-${model.id}`,
     title: model.caption,
     content: `<div class="wide">${renderTable(withUses(model, uses), {
-      sourceHref: (key) => `../references/index.html#${registerAnchor(key)}`,
+      // Cells that list dossiers are linked by the same means as those that list sources.
+      sourceHref: (key) => dossiers.get(key) ?? `../references/index.html#${registerAnchor(key)}`,
     })}</div>`,
   }));
   return articleBody({
@@ -52,7 +60,11 @@ function withUses(model: TableModel, uses: ReadonlyMap<string, readonly string[]
     columns: [...model.columns, { key: "used-by", title: "Used by", align: "left" }],
     rows: model.rows.map((row) => ({
       ...row,
-      cells: [...row.cells, { text: row.id === undefined ? "" : (uses.get(row.id)?.join(", ") ?? "") }],
+      cells: [...row.cells, usedBy(row.id === undefined ? [] : (uses.get(row.id) ?? []))],
     })),
   };
+}
+
+function usedBy(codes: readonly string[]): Cell {
+  return codes.length === 0 ? { text: "" } : { text: codes.join(", "), sourceKeys: codes };
 }
