@@ -8,9 +8,13 @@ import { axialFace, type Chair } from "./Chair.ts";
 const RADIUS = 1.4652;
 const HEIGHT = 0.2305;
 
-/** Direction of an equatorial bond: outwards and, by the tetrahedral angle, to the side away from the axial bond. */
-const EQUATORIAL_OUT = Math.sqrt(8) / 3;
-const EQUATORIAL_DOWN = 1 / 3;
+/**
+ * Direction of an equatorial bond: that of the ring bonds one removed, which run outwards by the circle's radius
+ * while they climb or fall by twice the height.
+ */
+const RING_BOND = Math.hypot(RADIUS, 2 * HEIGHT);
+const EQUATORIAL_OUT = RADIUS / RING_BOND;
+const EQUATORIAL_DOWN = (2 * HEIGHT) / RING_BOND;
 
 /** Covalent radii in Å for single bonds (rounded from Cordero et al., Dalton Trans. 2008, 2832; from memory). */
 const RADII: Readonly<Record<string, number>> = {
