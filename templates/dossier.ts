@@ -20,6 +20,12 @@ export interface DossierView {
   readonly lead: string;
   readonly prose: string;
   readonly sections: readonly Section[];
+  /** The dossiers before and after this one in the series. */
+  readonly neighbours: readonly {
+    readonly relation: "Previous" | "Next";
+    readonly code: string;
+    readonly href: string;
+  }[];
 }
 
 /** A dossier: what it is, what is concluded, the figure, the author's words, then the working. */
@@ -58,5 +64,15 @@ ${trusted(content)}
 </section>
 `,
 )}<aside class="caution"><p>${CAUTION}</p></aside>
-</article>`;
+${
+  view.neighbours.length > 0 &&
+  html`<nav class="neighbours" aria-label="Series">
+<ul>
+${view.neighbours.map(
+  ({ relation, code, href }) => html`<li>${relation}: <a href="${href}">${code}</a></li>
+`,
+)}</ul>
+</nav>
+`
+}</article>`;
 }

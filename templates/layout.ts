@@ -44,6 +44,7 @@ export function layout(frame: Frame, page: PageParts): Markup {
 <meta name="viewport" content="width=device-width, initial-scale=1">
 <meta name="description" content="${page.description}">
 <title>${page.title}</title>
+<link rel="icon" href="data:,">
 <link rel="stylesheet" href="${frame.root}assets/katex/katex.min.css">
 <link rel="stylesheet" href="${frame.root}assets/ringfolio.css">
 </head>

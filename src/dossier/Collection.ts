@@ -15,6 +15,8 @@ export interface Series {
 
 /** The whole content folder after analysis: what the site, the checks page and the commands read. */
 export interface Collection {
+  /** The content folder as an author types it, with a final slash; for messages. */
+  readonly folder: string;
   readonly title: string;
   readonly prose: { readonly markdown: string; readonly firstLine: number };
   readonly series: readonly Series[];

@@ -24,6 +24,7 @@ export function buildCollection(
     onProgress?.(index + 1, content.compounds.length);
   });
   return {
+    folder: folderOf(content),
     title: content.title,
     prose: content.prose,
     series: content.series.map((series) => ({
@@ -38,6 +39,12 @@ export function buildCollection(
     program: services.program,
     diagnostics: diagnostics.sort(compareDiagnostics),
   };
+}
+
+/** What stands before every file's own path in messages. */
+function folderOf(content: ContentInput): string {
+  const file = (content.compounds[0] ?? content.series[0])?.file;
+  return file === undefined ? "content/" : file.shownPath.slice(0, file.shownPath.length - file.path.length);
 }
 
 /** Codes in reading order: runs of digits compare as numbers, the rest by code units. */

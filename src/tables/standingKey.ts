@@ -6,5 +6,5 @@ export function standingKey(): string {
   const items = (Object.keys(STANDINGS) as CellStanding[]).map(
     (standing) => `<li>${standingMark(standing, "visible")}</li>`,
   );
-  return `<ul class="standing-key" aria-label="Marks of standing">${items.join("")}</ul>`;
+  return `<div role="group" aria-label="Marks of standing"><ul class="standing-key">${items.join("")}</ul></div>`;
 }

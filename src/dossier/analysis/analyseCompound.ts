@@ -68,7 +68,9 @@ export function analyseCompound(
   const structure = read.result;
   const open = new Set(
     structure.molecule === null
-      ? structure.identity.stereocentres.flatMap(({ atom, descriptor }) => (descriptor === "unspecified" ? [atom] : []))
+      ? structure.identity.stereocentres.flatMap(({ atom, descriptor }) =>
+          descriptor === "unspecified" ? [atom] : [],
+        )
       : [],
   );
   const rings = structure.rings.map((ring) => describeRing(ring, open));

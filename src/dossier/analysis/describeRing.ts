@@ -19,7 +19,8 @@ export function describeRing(ring: AnalysedRing, open: ReadonlySet<number> = new
         ringAtom: group.ringAtom,
         atom: group.atom,
         locant: locant(group.ringAtom),
-        face: site.faces === "free" || open.has(group.ringAtom) ? null : site.up === group.atom ? "up" : "down",
+        face:
+          site.faces === "free" || open.has(group.ringAtom) ? null : site.up === group.atom ? "up" : "down",
         group: group.group?.key ?? null,
         label: group.label,
         labelReversed: group.labelReversed,

@@ -1,4 +1,4 @@
-import { dossierBody, type Section } from "../../../templates/dossier.ts";
+import { type DossierView, dossierBody, type Section } from "../../../templates/dossier.ts";
 import type { Series } from "../../dossier/Collection.ts";
 import type { Dossier } from "../../dossier/Dossier.ts";
 import type { FigureName } from "../../drawing/figures.ts";
@@ -49,7 +49,18 @@ export function dossierPage(dossier: Dossier, series: Series, places: RegisterPl
     lead,
     prose,
     sections: sectionsOf(dossier, parts),
+    neighbours: neighboursOf(dossier, series),
   }).markup;
+}
+
+function neighboursOf(dossier: Dossier, series: Series): DossierView["neighbours"] {
+  const index = series.dossiers.findIndex(({ slug }) => slug === dossier.slug);
+  const entry = (relation: "Previous" | "Next", other: Dossier | undefined) =>
+    other === undefined ? [] : [{ relation, code: other.code, href: `../${other.slug}/index.html` }];
+  return [
+    ...entry("Previous", index > 0 ? series.dossiers[index - 1] : undefined),
+    ...entry("Next", series.dossiers[index + 1]),
+  ];
 }
 
 function missing(text: string): string {

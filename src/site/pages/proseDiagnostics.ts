@@ -23,10 +23,12 @@ export function proseDiagnostics(collection: Collection): readonly Diagnostic[] 
       };
     });
   return [
-    ...check("content/index.md", collection.prose),
+    ...check(`${collection.folder}index.md`, collection.prose),
     ...collection.series.flatMap((series) => [
-      ...check(`content/series/${series.slug}/index.md`, series.prose),
-      ...series.dossiers.flatMap((dossier) => check(`content/${dossier.input.file}`, dossier.prose)),
+      ...check(`${collection.folder}series/${series.slug}/index.md`, series.prose),
+      ...series.dossiers.flatMap((dossier) =>
+        check(`${collection.folder}${dossier.input.file}`, dossier.prose),
+      ),
     ]),
   ];
 }

@@ -1,0 +1,169 @@
+import { readFileSync } from "node:fs";
+import path from "node:path";
+import { HtmlValidate } from "html-validate";
+import { beforeAll, describe, expect, test } from "vitest";
+import { buildCollection } from "../../src/dossier/buildCollection.ts";
+import { readContent } from "../../src/dossier/content/readContent.ts";
+import { PALETTE } from "../../src/drawing/palette.ts";
+import { loadServices } from "../../src/site/loadServices.ts";
+import { siteAssets } from "../../src/site/pages/siteAssets.ts";
+import { sitePages } from "../../src/site/pages/sitePages.ts";
+
+const HOSTILE = `<script>alert(1)</script>"'><img src=x onerror=alert(2)>{{ 7*7 }}\${1}`;
+
+function file(name: string, text: string) {
+  return { path: name, shownPath: `content/${name}`, text, sha256: "0".repeat(64) };
+}
+
+const FILES = [
+  file("index.md", "---\ntitle: A & B <i>site</i>\n---\nText with <b>raw</b> HTML and {{ 7*7 }}.\n"),
+  file(
+    "series/one/index.md",
+    `---\ntitle: ${JSON.stringify(HOSTILE)}\nsummary: "a <b>summary</b>"\nnotice: "<u>notice</u>"\n---\nScope.\n\n::table[comparison]\n`,
+  ),
+  file(
+    "series/one/x-01.md",
+    `---\ncode: X-01\nname: ${JSON.stringify(HOSTILE)}\nstructure: "C[C@H]1CC[C@@H](O)CC1"\nevidence:\n  - observation: ${JSON.stringify(HOSTILE)}\n    source: ${JSON.stringify(HOSTILE)}\nclaim: { configuration: cis, statement: ${JSON.stringify(HOSTILE)} }\nreview: [ { by: ${JSON.stringify(HOSTILE)}, on: 2026-11-20, as: author } ]\n---\n${HOSTILE}\n\n[link](javascript:alert(3)) and $x^2$ and :value[population.major].\n\n::figure[chair]{conformer=B}\n`,
+  ),
+  file("series/one/x-02.md", '---\ncode: X-02\nname: plain\nstructure: "CN1CCC(C)CC1"\n---\n'),
+  file("series/one/x-03.md", '---\ncode: X-03\nname: fused\nstructure: "C1CCC2CCCCC2C1"\n---\n'),
+  file(
+    "series/one/x-04.md",
+    '---\ncode: X-04\nname: open\nstructure: "CC1CCC(O)CC1"\nstereoisomers: enumerate\n---\n',
+  ),
+];
+
+let made: ReadonlyMap<string, string>;
+
+beforeAll(async () => {
+  const services = await loadServices();
+  const content = readContent(FILES, [], services.register);
+  const collection = buildCollection(content, services);
+  expect(collection.diagnostics.filter(({ severity }) => severity === "error")).toEqual([]);
+  const { pages, diagnostics } = sitePages(collection);
+  expect(diagnostics).toEqual([]);
+  made = new Map(pages.map((page) => [page.path, page.render()]));
+});
+
+const html = () => [...made].filter(([name]) => name.endsWith(".html"));
+
+describe("Pages", () => {
+  test("exist for the site, its series and every compound, analysed or not", () => {
+    for (const name of [
+      "index.html",
+      "series/one/index.html",
+      "checks/index.html",
+      "register/index.html",
+      "references/index.html",
+      "methods/index.html",
+    ]) {
+      expect(made.has(name), name).toBe(true);
+    }
+    for (const slug of ["x-01", "x-02", "x-03", "x-04"])
+      expect(made.has(`series/one/${slug}/index.html`)).toBe(true);
+  });
+
+  test("show hostile text as text: no element, handler or address of the author's making", () => {
+    for (const [name, text] of html()) {
+      expect(text, name).not.toMatch(/<script|<img|onerror=(?!alert\(2\)&gt;)|href="javascript:/i);
+      expect(text, name).not.toContain("<b>raw</b>");
+      expect(text, name).not.toContain(">49<");
+    }
+    expect(made.get("series/one/x-01/index.html")).toContain("&lt;script&gt;");
+  });
+
+  test("are valid HTML", async () => {
+    const validator = new HtmlValidate({
+      extends: ["html-validate:recommended"],
+      rules: {
+        // Formulae carry inline style and presentation attributes of the typesetting library; long titles are names.
+        "no-inline-style": "off",
+        "long-title": "off",
+        "no-trailing-whitespace": "off",
+        "svg-focusable": "off",
+        "no-implicit-button-type": "off",
+        "element-permitted-content": "off",
+        "prefer-native-element": "off",
+        "tel-non-breaking": "off",
+      },
+    });
+    for (const [name, text] of html()) {
+      const report = await validator.validateString(text);
+      const messages = report.results.flatMap((result) =>
+        result.messages.map((m) => `${m.line}:${m.column} ${m.ruleId} ${m.message}`),
+      );
+      expect(messages, name).toEqual([]);
+    }
+  });
+
+  test("link only to pages, anchors and files that exist", () => {
+    const files = new Set([...made.keys(), ...siteAssets().map(({ to }) => to)]);
+    const ids = new Map(
+      html().map(([name, text]) => [name, new Set([...text.matchAll(/\sid="([^"]+)"/g)].map((m) => m[1]!))]),
+    );
+    const broken: string[] = [];
+    for (const [name, text] of html()) {
+      for (const [, raw] of text.matchAll(/\s(?:href|src)="([^"]+)"/g)) {
+        const address = raw!.replaceAll("&amp;", "&");
+        if (address.startsWith("data:")) continue;
+        const [target, anchor] = address.split("#");
+        const to = target === "" ? name : path.posix.join(path.posix.dirname(name), target!);
+        if (!files.has(to)) broken.push(`${name} -> ${address}`);
+        else if (anchor !== undefined && !ids.get(to)?.has(anchor))
+          broken.push(`${name} -> ${address} (no such anchor)`);
+      }
+    }
+    expect(broken).toEqual([]);
+  });
+
+  test("have every id once", () => {
+    for (const [name, text] of html()) {
+      const ids = [...text.matchAll(/\sid="([^"]+)"/g)].map((m) => m[1]!);
+      expect(
+        ids.filter((id, i) => ids.indexOf(id) !== i),
+        name,
+      ).toEqual([]);
+    }
+  });
+
+  test("number figures and tables in the order in which they stand", () => {
+    const text = made.get("series/one/x-01/index.html")!;
+    for (const word of ["Figure", "Table"]) {
+      const numbers = [...text.matchAll(new RegExp(`caption-number">${word} (\\d+)\\.`, "g"))].map((m) =>
+        Number(m[1]),
+      );
+      expect(numbers.length).toBeGreaterThan(1);
+      expect(numbers).toEqual(numbers.map((_, i) => i + 1));
+    }
+  });
+
+  test("say plainly when nothing was analysed, and carry the caution everywhere", () => {
+    expect(made.get("series/one/x-03/index.html")).toContain("fused to another ring");
+    for (const [name, text] of html()) expect(text, name).toContain("Draft for qualified review");
+  });
+
+  test("take their colours from the figures' palette", () => {
+    const css = readFileSync(new URL("../../templates/assets/ringfolio.css", import.meta.url), "utf8");
+    const [light, dark] = [...css.matchAll(/:root \{([^}]*--paper[^}]*)\}/g)].map((m) => m[1]!);
+    for (const [block, paper] of [
+      [light, PALETTE.light],
+      [dark, PALETTE.dark],
+    ] as const) {
+      for (const [ink, colour] of Object.entries(paper)) expect(block).toContain(`--${ink}: ${colour};`);
+    }
+  });
+});
+
+describe("Downloads", () => {
+  test("hold the record as it is, and guard cells of the author's making", () => {
+    const record = JSON.parse(made.get("series/one/x-01/x-01.json")!);
+    expect(record.name).toBe(HOSTILE);
+    expect(made.get("series/one/x-01/tables/evidence.csv")!.split("\r\n").length).toBeGreaterThan(1);
+  });
+
+  test("are drawings that stand alone", () => {
+    const svg = made.get("series/one/x-02/figures/equilibrium.svg")!;
+    expect(svg.startsWith('<?xml version="1.0" encoding="UTF-8"?>\n<svg')).toBe(true);
+    expect(svg.match(/xmlns="http:\/\/www\.w3\.org\/2000\/svg"/g)).toHaveLength(1);
+  });
+});
