@@ -35,12 +35,12 @@ function equilibriumSentences(facts: ConclusionFacts): readonly string[] {
   const share = (conformer: Conformer) => formatPopulation(conformer.population, conformer.population95);
   if (conformers.length === 2 && relation === "identical") {
     return [
-      `${facts.name} exists as two superimposable chairs, half of the molecules in each at any temperature; ring inversion exchanges equal forms.`,
+      `${facts.name} exists as two superimposable chairs, with half of the molecules in each at any temperature; ring inversion exchanges equal forms.`,
     ];
   }
   if (conformers.length === 2 && relation === "enantiomeric") {
     return [
-      `${facts.name} exists as two mirror-image chairs (${describe(A, facts.rings)} in either), equal in energy and half of the molecules in each at any temperature.`,
+      `${facts.name} exists as two mirror-image chairs (${describe(A, facts.rings)} in either), equal in energy, with half of the molecules in each at any temperature.`,
       "Each chair is chiral; their exchange makes the substance achiral on the time average as long as ring inversion is fast.",
     ];
   }
