@@ -118,7 +118,8 @@ function missingFolder(folder: string): Diagnostic {
     code: "missing-content-folder",
     severity: "error",
     place: { file: relative(process.cwd(), folder) || ".", line: 1, column: 1 },
-    message: "There is no such folder. Make it and put one Markdown file per compound under series/<series>/ in it, or name another folder with --content.",
+    message:
+      "There is no such folder. Make it and put one Markdown file per compound under series/<series>/ in it, or name another folder with --content.",
   };
 }
 

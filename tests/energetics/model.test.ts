@@ -128,3 +128,36 @@ describe("Structures", () => {
     expect(conformers.map(({ label }) => label)).toEqual(["1e,4e", "1e,4a", "1a,4e", "1a,4a"]);
   });
 });
+
+describe("Where a heteroring has no row for a group", () => {
+  const axialCharge = async (smiles: string, solvent?: string) => {
+    const { conformers } = await analyse(smiles, solvent === undefined ? {} : { solvent });
+    return conformers
+      .flatMap(({ contributions }) => contributions)
+      .find(({ kind }) => kind === "axial group" || kind === "anomeric")!;
+  };
+
+  test("a group of the same class at the same place stands in, anomeric effect and all", async () => {
+    const charge = await axialCharge("CCOC1CCCCO1", "CCl4");
+    expect(charge).toMatchObject({ kind: "anomeric", basis: "not available" });
+    expect(charge.value_kJ_mol).toBeLessThan(0);
+    expect(charge.source).toContain("that of OMe");
+  });
+
+  test("then the group in another state of the nitrogen", async () => {
+    expect((await axialCharge("OC1CCN(C)CC1")).source).toContain("that of piperidine/NH");
+  });
+
+  test("but never across a charge for a polar group, whose doubt is then wide", async () => {
+    const charge = await axialCharge("FC1CC[NH2+]CC1", "D2O");
+    expect(charge.source).toContain("cyclohexane value");
+    expect(kcal(charge.u_kJ_mol)).toBeGreaterThanOrEqual(1);
+  });
+
+  test("then the cyclohexane value, for carbon groups scaled as methyl is", async () => {
+    const charge = await axialCharge("CC(C)C1CCCOC1");
+    expect(charge.source).toContain("ratio for methyl");
+    // Methyl at C3 of oxane is 1.43 against 1.74 kcal/mol in cyclohexane.
+    expect(kcal(charge.value_kJ_mol)).toBeLessThan(2.21);
+  });
+});

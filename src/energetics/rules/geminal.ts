@@ -1,5 +1,5 @@
 import { orientationOf } from "../../conformers/Chair.ts";
-import { cyclohexaneParameter } from "../axialParameter.ts";
+import { cyclohexaneParameter } from "../cyclohexaneParameter.ts";
 import { pairParameter } from "../pairParameter.ts";
 import { classOf, nameOf } from "../siteGroup.ts";
 import { standIn } from "../standIn.ts";

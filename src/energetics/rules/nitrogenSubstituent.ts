@@ -21,7 +21,6 @@ export const nitrogenSubstituent: EnergyRule = {
       )
       .map((group) => {
         const { ring } = chair;
-        const locant = ring.locants[ring.atoms.indexOf(group.ringAtom)]!;
         const lookup = (key: string) =>
           nitrogenRow(context.register, { ...context, ring: ring.ringKey, group: key });
         const name = nameOf(group);
