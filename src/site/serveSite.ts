@@ -72,6 +72,8 @@ export async function serveSite(options: ServeOptions): Promise<RunningServer> {
   const clean = () => {
     for (const folder of [output, input]) rmSync(folder, { recursive: true, force: true });
   };
+  // A rebuild under way when the server stops writes on; its files go when the process does.
+  process.once("exit", clean);
   try {
     await eleventy.init();
     const rebuild = await eleventy.watch();

@@ -40,7 +40,10 @@ export function chooseNumbering(
 ): readonly number[] {
   const ranks = groups.map((group) => group.seniority).filter((rank) => rank > 0);
   const senior = ranks.length > 0 ? Math.min(...ranks) : 0;
-  const alphabetical = [...groups].sort((a, b) => (a.prefix < b.prefix ? -1 : a.prefix > b.prefix ? 1 : 0));
+  const alphabetical = [...groups].sort((a, b) => {
+    const [x, y] = [lettersOf(a.prefix), lettersOf(b.prefix)];
+    return x < y ? -1 : x > y ? 1 : 0;
+  });
   const score = (numbering: readonly number[]): readonly number[] => {
     const locant = (atom: number) => numbering.indexOf(atom) + 1;
     const sorted = (list: readonly number[]) => [...list].sort((a, b) => a - b);
@@ -59,6 +62,14 @@ export function chooseNumbering(
     return [...suffix, ...all, ...prefixes, ...senses, ...fromLowestAtom(numbering)];
   };
   return [...numberings].sort((a, b) => compareLists(score(a), score(b)))[0]!;
+}
+
+/** What counts for alphabetical order (IUPAC P-14.5): letters only, without structural prefixes such as tert. */
+function lettersOf(prefix: string): string {
+  return prefix
+    .replace(/\b(?:tert|sec)-/g, "")
+    .replace(/[^A-Za-z]/g, "")
+    .toLowerCase();
 }
 
 /** The same walk around the ring, begun at its lowest atom. */

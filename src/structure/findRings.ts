@@ -111,7 +111,7 @@ function unsaturation(
       if (!inRing && (atom.element === "S" || atom.element === "P" || atom.element === "Se")) continue;
       return {
         code: "unsupported-unsaturated-ring",
-        message: `${where} has a double bond ${inRing ? "in the ring" : "on"} at atom ${atom.index}; such rings are not analysed yet.`,
+        message: `${where} has a double bond ${inRing ? "at" : "on"} its atom ${atom.index}; such rings are not analysed yet.`,
       };
     }
   }

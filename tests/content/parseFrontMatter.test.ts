@@ -101,7 +101,9 @@ describe("front matter that cannot be read", () => {
     ["an alias of nothing", "---\na: *x\n---\n", "2:4 broken-yaml"],
     ["a second document", "---\na: 1\n...\nb: 2\n---\n", "4:1 broken-yaml"],
     ["a list as a key", "---\n? [a]\n: 1\n---\n", "2:3 broken-yaml"],
-    ["nesting without end", `---\na: ${"[".repeat(20_000)}\n---\n`, "2:1 broken-yaml"],
+    ["a list in a list in a list without end", `---\na:\n  ${"- ".repeat(5_000)}x\n---\n`, "3:3 broken-yaml"],
+    ["indentation without end", `---\na:\n${" ".repeat(200)}b: 1\n---\n`, "3:1 broken-yaml"],
+    ["nesting without end", `---\na: ${"[".repeat(20_000)}\n---\n`, "2:64 broken-yaml"],
     ["an alias within itself", "---\na: &a [*a]\n---\n", "2:8 broken-yaml"],
   ])("is reported at its place: %s", (_what, text, told) => {
     expect(codes(text)).toEqual([told]);

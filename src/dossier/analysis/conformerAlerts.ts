@@ -83,7 +83,7 @@ export function conformerAlerts(
       `A twist-boat may compete: ${reason}. Non-chair forms are not listed yet.`,
     );
   }
-  const pairs = donorPairs(rings, context);
+  const pairs = donorPairs(result.chairSets, context);
   if (pairs.length > 0) {
     add(
       "caution",
@@ -108,23 +108,26 @@ export function conformerAlerts(
   return alerts;
 }
 
-/** Donor beside a polar group, on neighbouring ring atoms or 1,3 to it. */
-function donorPairs(rings: readonly AnalysedRing[], context: EnergyContext): readonly string[] {
-  const found: string[] = [];
-  for (const ring of rings) {
+/** Donor within reach of a polar group in some conformer: gauche on neighbouring ring atoms, or syn-axial. */
+function donorPairs(chairSets: ConformerResult["chairSets"], context: EnergyContext): readonly string[] {
+  const found = new Set<string>();
+  for (const chair of chairSets.flat()) {
+    const { ring } = chair;
     const polar = ring.substituents.filter((group) => classOf(context.register, group).polar);
     const at = (group: Substituent) => ring.atoms.indexOf(group.ringAtom);
     polar.forEach((a, i) => {
       for (const b of polar.slice(i + 1)) {
         const steps = Math.abs(at(a) - at(b));
         const distance = Math.min(steps, 6 - steps);
-        if (distance === 0 || distance > 2) continue;
+        const bothAxial = orientationOf(chair, a) === "axial" && orientationOf(chair, b) === "axial";
+        const inReach = (distance === 1 && !bothAxial) || (distance === 2 && bothAxial);
+        if (!inReach) continue;
         if (!classOf(context.register, a).donor && !classOf(context.register, b).donor) continue;
-        found.push(`${labelText(a.label)} and ${labelText(b.label)} 1,${distance + 1}`);
+        found.add(`${labelText(a.label)} and ${labelText(b.label)} 1,${distance + 1}`);
       }
     });
   }
-  return found;
+  return [...found].sort();
 }
 
 /** An oxane with three or more oxygen groups in a protic medium. */

@@ -1,14 +1,20 @@
 import { type Document, isMap, isScalar, parseDocument } from "yaml";
+import { findDeepNesting } from "./findDeepNesting.ts";
 import { MOST_ALIASES, type ReportAt, reportYamlProblems, TOO_MANY_ALIASES } from "./reportYamlProblems.ts";
 
 /**
- * Reads a set of keys from YAML text as plain data, or reports why not and gives null. The parser recurses,
- * so very deep nesting ends in a stack overflow, which is caught like any other refusal.
+ * Reads a set of keys from YAML text as plain data, or reports why not and gives null. The parser recurses, so
+ * nesting is bounded before it begins; whatever it still throws is a refusal like any other.
  */
 export function readYaml(
   yaml: string,
   report: ReportAt,
 ): { readonly document: Document.Parsed; readonly data: Readonly<Record<string, unknown>> } | null {
+  const deep = findDeepNesting(yaml);
+  if (deep !== null) {
+    report("broken-yaml", deep, 1, "Lists or keys are nested too deeply.");
+    return null;
+  }
   let document: Document.Parsed;
   try {
     document = parseDocument(yaml, {
