@@ -5,7 +5,11 @@ import { defineConfig } from "vitest/config";
 const root = fileURLToPath(new URL("..", import.meta.url));
 
 /** A test that asserts nothing proves nothing, so it fails. */
-const shared = { expect: { requireAssertions: true }, environment: "node" as const };
+const shared = {
+  expect: { requireAssertions: true },
+  environment: "node" as const,
+  setupFiles: ["tests/seeded.ts"],
+};
 
 export default defineConfig({
   root,

@@ -1,5 +1,6 @@
 import type { Conformer, Dossier } from "../dossier/Dossier.ts";
 import { formatTemperature } from "../quantity/formatTemperature.ts";
+import { nameMarkup } from "../quantity/nameMarkup.ts";
 import { chairScene } from "./chairScene.ts";
 import { describeConformer } from "./describeConformer.ts";
 import { describeConformers } from "./describeConformers.ts";
@@ -26,7 +27,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
     title: "One conformer",
     caption: (dossier, options = {}) => {
       const { id, label } = chosenConformer(dossier, options);
-      return `Conformer ${id}${label === "" ? "" : ` (${label})`} of ${dossier.name}. ${CUES}`;
+      return `Conformer ${id}${label === "" ? "" : ` (${label})`} of ${nameMarkup(dossier.name)}. ${CUES}`;
     },
     describe: (dossier, options = {}) => describeConformer(dossier, chosenConformer(dossier, options)),
     canShow: (dossier, options = {}) =>
@@ -41,7 +42,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
       const wedges = wedged
         ? " Solid wedges point towards the viewer, hashed wedges away; the narrow end is at the stereocentre."
         : "";
-      return `Structural diagram of ${dossier.name} with ring locants.${wedges}`;
+      return `Structural diagram of ${nameMarkup(dossier.name)} with ring locants.${wedges}`;
     },
     describe: (dossier) => describeStructure(dossier),
     canShow: (dossier) => dossier.structure.atoms.length > 0,
@@ -50,7 +51,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
   temperature: {
     title: "Populations against temperature",
     caption: (dossier) =>
-      `Populations of the conformers of ${dossier.name} (${medium(dossier)}) against temperature. ` +
+      `Populations of the conformers of ${nameMarkup(dossier.name)} (${medium(dossier)}) against temperature. ` +
       "Bands: 95 % intervals; dotted line: 50 %; " +
       `vertical line: ${formatTemperature(dossier.conditions.temperature_K)}.`,
     describe: (dossier) => describeTemperatures(dossier),
@@ -69,7 +70,7 @@ function captionOfEquilibrium(dossier: Dossier): string {
       ? " Arrow lengths show the direction of the equilibrium, on a logarithmic scale."
       : "";
   return (
-    `${what} of ${dossier.name} (${medium(dossier)}) at ${formatTemperature(dossier.conditions.temperature_K)}, ` +
+    `${what} of ${nameMarkup(dossier.name)} (${medium(dossier)}) at ${formatTemperature(dossier.conditions.temperature_K)}, ` +
     `with populations and 95 % intervals. ${CUES}${arrows}`
   );
 }

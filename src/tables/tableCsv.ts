@@ -43,7 +43,8 @@ function plain(value: number | null): string {
 }
 
 function guarded(text: string): string {
-  return /^[=+\-@\t\r\n]/.test(text) ? `'${text}` : text;
+  // A text that begins with an apostrophe before such a sign gets one more, so that taking one away gives it back.
+  return /^'*[=+\-@\t\r\n]/.test(text) ? `'${text}` : text;
 }
 
 function field(text: string): string {

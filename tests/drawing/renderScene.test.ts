@@ -4,6 +4,7 @@ import { FIGURES, type FigureName } from "../../src/drawing/figures.ts";
 import { renderFigure } from "../../src/drawing/renderFigure.ts";
 import { renderScene } from "../../src/drawing/renderScene.ts";
 import type { Scene } from "../../src/drawing/Scene.ts";
+import { labelText } from "../../src/quantity/labelText.ts";
 import { sampleDossier } from "./makeDossier.ts";
 import { variants } from "./variants.ts";
 
@@ -80,7 +81,7 @@ describe("The registry of figures", () => {
       expect(FIGURES[name].canShow(sampleDossier)).toBe(true);
       const { svg, caption, title } = renderFigure(sampleDossier, name);
       expect(svg).toContain(`id="fig-sx-01-${name}-title"`);
-      expect(caption).toContain(sampleDossier.name);
+      expect(labelText(caption)).toContain(sampleDossier.name);
       expect(title).not.toBe("");
       expect(FIGURES[name].describe(sampleDossier)).not.toMatch(/[_^*]/);
     }

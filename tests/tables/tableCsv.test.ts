@@ -84,7 +84,7 @@ describe("CSV", () => {
       fc.property(fc.string(), (text) => {
         if (text === "\u2013") return;
         const [, row] = parseCsv(tableCsv(words(text)));
-        expect(row![0]!.replace(/^'(?=[=+\-@\t\r\n])/, "")).toBe(text);
+        expect(row![0]!.replace(/^'(?='*[=+\-@\t\r\n])/, "")).toBe(text);
       }),
     );
   });

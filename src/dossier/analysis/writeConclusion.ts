@@ -1,6 +1,7 @@
 import { formatEnergy } from "../../quantity/formatEnergy.ts";
 import { formatPopulation } from "../../quantity/formatPopulation.ts";
 import { formatTemperature } from "../../quantity/formatTemperature.ts";
+import { nameMarkup } from "../../quantity/nameMarkup.ts";
 import type { Alert, Conditions, Conformer, Equilibrium, MemberSummary, Ring } from "../Dossier.ts";
 
 /** What the paragraph is written from. */
@@ -23,7 +24,7 @@ export function writeConclusion(facts: ConclusionFacts): string {
       facts.members.length > 0
         ? ` The ${facts.members.length} stereoisomers that the structure as written may stand for are listed with their own major conformers.`
         : "";
-    return `No conformational conclusion is drawn for ${facts.name}. ${stop?.message ?? "Its configuration is open."}${members}`;
+    return `No conformational conclusion is drawn for ${nameMarkup(facts.name)}. ${stop?.message ?? "Its configuration is open."}${members}`;
   }
   return [...equilibriumSentences(facts), ...limitSentences(facts)].join(" ");
 }
@@ -35,12 +36,12 @@ function equilibriumSentences(facts: ConclusionFacts): readonly string[] {
   const share = (conformer: Conformer) => formatPopulation(conformer.population, conformer.population95);
   if (conformers.length === 2 && relation === "identical") {
     return [
-      `${facts.name} exists as two superimposable chairs, with half of the molecules in each at any temperature; ring inversion exchanges equal forms.`,
+      `${nameMarkup(facts.name)} exists as two superimposable chairs, with half of the molecules in each at any temperature; ring inversion exchanges equal forms.`,
     ];
   }
   if (conformers.length === 2 && relation === "enantiomeric") {
     return [
-      `${facts.name} exists as two mirror-image chairs (${describe(A, facts.rings)} in either), equal in energy, with half of the molecules in each at any temperature.`,
+      `${nameMarkup(facts.name)} exists as two mirror-image chairs (${describe(A, facts.rings)} in either), equal in energy, with half of the molecules in each at any temperature.`,
       "Each chair is chiral; their exchange makes the substance achiral on the time average as long as ring inversion is fast.",
     ];
   }
@@ -53,8 +54,8 @@ function equilibriumSentences(facts: ConclusionFacts): readonly string[] {
   const unresolved = next?.unresolved === true;
   const sentences = [
     unresolved
-      ? `${where} the major conformer of ${facts.name} is unresolved: ${major}, and the interval of the free-energy difference contains zero.`
-      : `${where} ${facts.name} prefers one form: ${major}.`,
+      ? `${where} the major conformer of ${nameMarkup(facts.name)} is unresolved: ${major}, and the interval of the free-energy difference contains zero.`
+      : `${where} ${nameMarkup(facts.name)} prefers one form: ${major}.`,
   ];
   if (next !== undefined) {
     const other = conformers.find((conformer) => conformer.id === next.to)!;

@@ -4,6 +4,7 @@ import type { Dossier } from "../../dossier/Dossier.ts";
 import type { FigureName } from "../../drawing/figures.ts";
 import { escapeHtml } from "../../quantity/escapeHtml.ts";
 import { labelHtml } from "../../quantity/labelHtml.ts";
+import { nameMarkup } from "../../quantity/nameMarkup.ts";
 import { DossierParts } from "./DossierParts.ts";
 import { dossierValue } from "./dossierValue.ts";
 import { PagePlan } from "./PagePlan.ts";
@@ -40,7 +41,7 @@ export function dossierPage(dossier: Dossier, series: Series, places: RegisterPl
   }).html;
   return dossierBody({
     code: dossier.code,
-    name: escapeHtml(dossier.name),
+    name: labelHtml(nameMarkup(dossier.name)),
     seriesTitle: series.title,
     seriesHref: "../index.html",
     status: statusOf(dossier),
