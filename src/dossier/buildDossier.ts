@@ -1,4 +1,5 @@
 import type { Diagnostic } from "../diagnostics/Diagnostic.ts";
+import { deepFreeze } from "../register/deepFreeze.ts";
 import { type Analysis, analyseCompound } from "./analysis/analyseCompound.ts";
 import type { Services } from "./analysis/Services.ts";
 import { writeConclusion } from "./analysis/writeConclusion.ts";
@@ -78,7 +79,7 @@ function assemble(input: CompoundInput, analysis: Analysis, services: Services):
     review: input.review,
     sources: sourcesOf(analysis, services),
   };
-  return { ...record, resultSha256: sha256(canonicalJson(record)) };
+  return deepFreeze({ ...record, resultSha256: sha256(canonicalJson(record)) });
 }
 
 function sourcesOf(analysis: Analysis, services: Services): readonly SourceNote[] {

@@ -1,6 +1,7 @@
 import { LineCounter, type ParsedNode, parseDocument, type YAMLSeq } from "yaml";
 import type { Diagnostic } from "../diagnostics/Diagnostic.ts";
 import { nearestWord } from "../diagnostics/nearestWord.ts";
+import { deepFreeze } from "./deepFreeze.ts";
 import type { Register, RegisterRow } from "./Register.ts";
 import { type Entry, REGISTER_FILES, type RegisterFile } from "./registerSchema.ts";
 
@@ -261,12 +262,4 @@ function withoutUndefined<T extends object>(value: T): { [K in keyof T]: Exclude
   return Object.fromEntries(Object.entries(value).filter(([, entry]) => entry !== undefined)) as {
     [K in keyof T]: Exclude<T[K], undefined>;
   };
-}
-
-function deepFreeze<T>(value: T): T {
-  if (value !== null && typeof value === "object" && !Object.isFrozen(value)) {
-    Object.freeze(value);
-    for (const entry of Object.values(value)) deepFreeze(entry);
-  }
-  return value;
 }

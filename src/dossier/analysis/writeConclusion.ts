@@ -24,7 +24,7 @@ export function writeConclusion(facts: ConclusionFacts): string {
       facts.members.length > 0
         ? ` The ${facts.members.length} stereoisomers that the structure as written may stand for are listed with their own major conformers.`
         : "";
-    return `No conformational conclusion is drawn for ${nameMarkup(facts.name)}. ${stop?.message ?? "Its configuration is open."}${members}`;
+    return `No conformational conclusion is drawn for ${nameMarkup(facts.name)}. ${stop?.message ?? "Its configuration is open."}${members} Draft for qualified review.`;
   }
   return [...equilibriumSentences(facts), ...limitSentences(facts)].join(" ");
 }
