@@ -52,7 +52,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
     title: "Populations against temperature",
     caption: (dossier) =>
       `Populations of the conformers of ${nameMarkup(dossier.name)} (${medium(dossier)}) against temperature. ` +
-      "Bands: 95 % intervals; dotted line: 50 %; " +
+      "Bands: 95\u00a0% intervals; dotted line: 50\u00a0%; " +
       `vertical line: ${formatTemperature(dossier.conditions.temperature_K)}.`,
     describe: (dossier) => describeTemperatures(dossier),
     canShow: (dossier) => dossier.conformers.length > 0 && dossier.temperatures.length > 1,
@@ -71,7 +71,7 @@ function captionOfEquilibrium(dossier: Dossier): string {
       : "";
   return (
     `${what} of ${nameMarkup(dossier.name)} (${medium(dossier)}) at ${formatTemperature(dossier.conditions.temperature_K)}, ` +
-    `with populations and 95 % intervals. ${CUES}${arrows}`
+    `with populations and 95\u00a0% intervals. ${CUES}${arrows}`
   );
 }
 

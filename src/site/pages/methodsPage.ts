@@ -55,7 +55,7 @@ export function methodsPage(): string {
             "population and equilibrium constant",
             "p_i=\\frac{e^{-G_i/RT}}{\\sum_k e^{-G_k/RT}}\\qquad K=e^{-\\Delta G^\\circ/RT}\\qquad R=8.314\\,462\\,618\\ \\mathrm{J\\,mol^{-1}\\,K^{-1}}",
           ) +
-          "<p>Register rows are independent of each other; a row used in both conformers moves both, so factors are subtracted before they are squared. Intervals are 95 %, from 1.96 standard uncertainties. For two conformers the ends of the interval of ΔG° are transformed; for more, the interval of logit p is propagated to first order and transformed back. When the interval of ΔG° contains zero the dossier says that the major conformer is unresolved. Chairs that are equal by symmetry hold exactly equal shares and carry no uncertainty. 1 kcal = 4.184 kJ exactly.</p>",
+          "<p>Register rows are independent of each other; a row used in both conformers moves both, so factors are subtracted before they are squared. Intervals are 95\u00a0%, from 1.96 standard uncertainties. For two conformers the ends of the interval of ΔG° are transformed; for more, the interval of logit p is propagated to first order and transformed back. When the interval of ΔG° contains zero the dossier says that the major conformer is unresolved. Chairs that are equal by symmetry hold exactly equal shares and carry no uncertainty. 1 kcal = 4.184 kJ exactly.</p>",
       },
       {
         id: "limits",

@@ -23,7 +23,7 @@ export function seriesPage(series: Series): string {
     return plan.figure(
       `figure-${series.slug}`,
       svg,
-      "Population of the major conformer of each compound, with its 95 % interval, at the conditions of its dossier.",
+      "Population of the major conformer of each compound, with its 95\u00a0% interval, at the conditions of its dossier.",
     );
   };
   const prose = renderProse(series.prose.markdown, ({ kind, name }) =>
