@@ -84,6 +84,7 @@ function answer(id: unknown, fields: Record<string, unknown>, services: Services
   if (!result.ok || refusal !== null) return failure(id, refusal!.code, refusal!.message, refusal!.position);
   const { analysis } = result;
   const { identity } = analysis;
+  const written = (atom: number) => analysis.writtenAtoms[atom]!;
   return JSON.stringify({
     id,
     ok: true,
@@ -92,12 +93,18 @@ function answer(id: unknown, fields: Record<string, unknown>, services: Services
       inchi: identity.inchi,
       inchikey: identity.inchikey,
       formula: identity.formula,
-      stereocentres: identity.stereocentres.map(({ atom, descriptor }) => ({ atom, descriptor })),
-      stereobonds: identity.stereobonds,
+      stereocentres: identity.stereocentres.map(({ atom, descriptor }) => ({
+        atom: written(atom),
+        descriptor,
+      })),
+      stereobonds: identity.stereobonds.map(({ atoms, descriptor }) => ({
+        atoms: atoms.map(written),
+        descriptor,
+      })),
       chirality: identity.chirality,
     },
     rings: analysis.rings.map(({ atoms, parent, locants, configuration }) => ({
-      atoms,
+      atoms: atoms.map(written),
       parent,
       locants,
       configuration,
@@ -107,8 +114,8 @@ function answer(id: unknown, fields: Record<string, unknown>, services: Services
       label: conformer.label,
       positions: conformer.positions.map(({ ring, ringAtom, substituent, orientation, face, locant }) => ({
         ring,
-        ringAtom,
-        substituent,
+        ringAtom: written(ringAtom),
+        substituent: written(substituent),
         orientation,
         face,
         locant,
@@ -120,7 +127,7 @@ function answer(id: unknown, fields: Record<string, unknown>, services: Services
       contributions: conformer.contributions.map((contribution) => ({
         kind: contribution.kind,
         label: contribution.label,
-        atoms: contribution.atoms,
+        atoms: contribution.atoms.map(written),
         value_kJ_mol: contribution.value_kJ_mol,
         u_kJ_mol: contribution.u_kJ_mol,
         basis: contribution.basis,

@@ -60,7 +60,7 @@ export function buildDossier(
 }
 
 function assemble(input: CompoundInput, analysis: Analysis, services: Services): Dossier {
-  const { refusal: _refusal, ...parts } = analysis;
+  const { refusal: _refusal, writtenAtoms: _writtenAtoms, ...parts } = analysis;
   const record: Dossier = {
     schemaVersion: DOSSIER_SCHEMA_VERSION,
     program: services.program,

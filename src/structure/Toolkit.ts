@@ -19,7 +19,14 @@ export interface Toolkit {
 }
 
 export type ReadResult =
-  | { readonly ok: true; readonly molecule: Molecule; readonly formula: string; readonly molarMass: number }
+  | {
+      readonly ok: true;
+      readonly molecule: Molecule;
+      /** Place of each atom in the SMILES as written, where hydrogens written as atoms count too. */
+      readonly writtenAtoms: readonly number[];
+      readonly formula: string;
+      readonly molarMass: number;
+    }
   | {
       readonly ok: false;
       readonly reason: string /** 0-based character in the string, where known. */;

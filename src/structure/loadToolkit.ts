@@ -118,7 +118,35 @@ function read(library: MainModule, log: Log, smiles: string): ReadResult {
       };
     }
     const values = JSON.parse(mol.get_descriptors()) as { amw: number };
-    return { ok: true, molecule, formula: hillFormula(molecule), molarMass: values.amw };
+    return {
+      ok: true,
+      molecule,
+      writtenAtoms: writtenAtoms(library, smiles, molecule),
+      formula: hillFormula(molecule),
+      molarMass: values.amw,
+    };
+  } finally {
+    mol.delete();
+  }
+}
+
+/**
+ * The library folds hydrogens written as atoms into their neighbours. Read again with them kept, the atoms that are
+ * no such hydrogen stand in the same order.
+ */
+function writtenAtoms(library: MainModule, smiles: string, molecule: Molecule): readonly number[] {
+  const all = molecule.atoms.map((atom) => atom.index);
+  if (!smiles.includes("[H]")) return all;
+  const mol = library.get_mol(smiles, JSON.stringify({ removeHs: false }));
+  if (mol === null) return all;
+  try {
+    const whole = fromJson((JSON.parse(mol.get_json()) as { molecules: JsonMolecule[] }).molecules[0]!);
+    const kept = whole.atoms.filter(
+      (atom) => !(atom.element === "H" && atom.isotope === 0 && atom.neighbours.length === 1),
+    );
+    const fits =
+      kept.length === all.length && kept.every((atom, i) => atom.element === molecule.atoms[i]!.element);
+    return fits ? kept.map((atom) => atom.index) : all;
   } finally {
     mol.delete();
   }

@@ -32,6 +32,15 @@ describe("A line of the batch command", () => {
     ]);
   });
 
+  test("counts hydrogens written as atoms, as the SMILES does", async () => {
+    const answer = await ask(JSON.stringify({ id: "x", smiles: "[H][C@]1(C)CCCC[C@@]1([H])O" }));
+    // By hand: H0 C1 C2 C3 C4 C5 C6 C7 H8 O9.
+    expect([...answer.rings[0].atoms].sort()).toEqual([1, 3, 4, 5, 6, 7]);
+    const groups = answer.conformers[0].positions.map((p: { substituent: number }) => p.substituent);
+    expect(groups.sort()).toEqual([2, 9]);
+    expect(answer.identity.stereocentres.map((c: { atom: number }) => c.atom)).toEqual([1, 7]);
+  });
+
   test("without a needed configuration lists the centres as unspecified and stops there", async () => {
     const answer = await ask('{"id":"x","smiles":"CC1CCC(C)CC1"}');
     expect(answer.identity.stereocentres.map((c: { descriptor: string }) => c.descriptor)).toEqual([

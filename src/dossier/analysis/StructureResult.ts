@@ -16,6 +16,8 @@ export interface StructureResult {
   readonly identity: Identity;
   readonly structure: Structure;
   readonly written: Molecule;
+  /** Place of each atom in the SMILES as written, hydrogens written as atoms counted. */
+  readonly writtenAtoms: readonly number[];
   /** Saturated six-membered rings that stand alone; empty when `refusal` says why. */
   readonly rings: readonly AnalysedRing[];
   readonly refusal: Refusal | null;

@@ -37,6 +37,8 @@ export interface Analysis {
   readonly conditions: Conditions;
   readonly identity: Identity;
   readonly structure: Structure;
+  /** Place of each atom in the SMILES as written; not its index only where hydrogens are written as atoms. */
+  readonly writtenAtoms: readonly number[];
   readonly rings: readonly Ring[];
   readonly conformers: readonly Conformer[];
   readonly relation: ChairRelation | null;
@@ -108,6 +110,7 @@ export function analyseCompound(
       conditions,
       identity: structure.identity,
       structure: structure.structure,
+      writtenAtoms: structure.writtenAtoms,
       rings,
       conformers: result?.conformers ?? [],
       relation: result?.relation ?? null,

@@ -55,6 +55,7 @@ export function readStructure(
     identity,
     structure: drawStructure(written, services),
     written,
+    writtenAtoms: read.writtenAtoms,
     rings,
     refusal,
     molecule: refusal === null ? chosen : null,
