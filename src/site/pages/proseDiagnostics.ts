@@ -2,26 +2,13 @@ import type { Diagnostic } from "../../diagnostics/Diagnostic.ts";
 import type { Collection } from "../../dossier/Collection.ts";
 import { renderProse } from "./renderProse.ts";
 
-/** Formulae in prose that cannot be set, each at its place in the content file. */
+interface Prose {
+  readonly markdown: string;
+  readonly firstLine: number;
+}
+
+/** What only setting the prose shows, each at its place in the content file: formulae that cannot be set, pictures. */
 export function proseDiagnostics(collection: Collection): readonly Diagnostic[] {
-  const check = (
-    file: string,
-    prose: { readonly markdown: string; readonly firstLine: number },
-  ): Diagnostic[] =>
-    renderProse(prose.markdown, () => "").problems.map(({ message, line, column }) => {
-      const sourceLine = prose.markdown.split("\n")[line - 1];
-      return {
-        code: "bad-formula",
-        severity: "error",
-        place: {
-          file,
-          line: prose.firstLine + line - 1,
-          column,
-          ...(sourceLine === undefined ? {} : { sourceLine }),
-        },
-        message,
-      };
-    });
   return [
     ...check(`${collection.folder}index.md`, collection.prose),
     ...collection.series.flatMap((series) => [
@@ -30,5 +17,37 @@ export function proseDiagnostics(collection: Collection): readonly Diagnostic[] 
         check(`${collection.folder}${dossier.input.file}`, dossier.prose),
       ),
     ]),
+  ];
+}
+
+function check(file: string, prose: Prose): readonly Diagnostic[] {
+  const { problems, pictures } = renderProse(prose.markdown, () => null);
+  const place = ({ line, column }: { readonly line: number; readonly column: number }) => {
+    const sourceLine = prose.markdown.split("\n")[line - 1];
+    return {
+      file,
+      line: prose.firstLine + line - 1,
+      column,
+      ...(sourceLine === undefined ? {} : { sourceLine }),
+    };
+  };
+  return [
+    ...problems.map(
+      (problem): Diagnostic => ({
+        code: "bad-formula",
+        severity: "error",
+        place: place(problem),
+        message: problem.message,
+      }),
+    ),
+    ...pictures.map(
+      (picture): Diagnostic => ({
+        code: "picture-not-shown",
+        severity: "caution",
+        place: place(picture),
+        message:
+          "Pictures are not shown; readers see their words in brackets. Use ::figure[…] for what the program draws, and record measured data under evidence.",
+      }),
+    ),
   ];
 }

@@ -1,6 +1,7 @@
 import { trusted } from "../../../templates/html.ts";
 import { layout } from "../../../templates/layout.ts";
 import type { Diagnostic } from "../../diagnostics/Diagnostic.ts";
+import { compareDiagnostics } from "../../diagnostics/printDiagnostic.ts";
 import type { Collection, Series } from "../../dossier/Collection.ts";
 import { SERIES_TABLES } from "../../tables/SERIES_TABLES.ts";
 import { tableCsv } from "../../tables/tableCsv.ts";
@@ -26,6 +27,7 @@ export function sitePages(collection: Collection): {
   readonly diagnostics: readonly Diagnostic[];
 } {
   const anchors = registerAnchors(collection.register);
+  const diagnostics = proseDiagnostics(collection);
   const page = (
     path: string,
     title: string,
@@ -52,13 +54,13 @@ export function sitePages(collection: Collection): {
   const plain = (path: string, name: string, description: string, body: () => string) =>
     page(path, `${name} · ${collection.title}`, description, name, null, body);
   return {
-    diagnostics: proseDiagnostics(collection),
+    diagnostics,
     pages: [
       page("index.html", collection.title, "Conformational analysis dossiers", "Home", null, () =>
         homePage(collection),
       ),
       plain("checks/index.html", "Checks", "What a reviewer still has to look at", () =>
-        checksPage(collection, collection.diagnostics),
+        checksPage(collection, [...collection.diagnostics, ...diagnostics].sort(compareDiagnostics)),
       ),
       plain("register/index.html", "Register", "Every parameter with its source and standing", () =>
         registerPage(collection),
