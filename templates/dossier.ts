@@ -20,6 +20,8 @@ export interface DossierView {
   readonly lead: string;
   readonly prose: string;
   readonly sections: readonly Section[];
+  /** Where each part of the dossier stands, in its order. */
+  readonly contents: readonly { readonly id: string; readonly title: string }[];
   /** The dossiers before and after this one in the series. */
   readonly neighbours: readonly {
     readonly relation: "Previous" | "Next";
@@ -46,7 +48,7 @@ ${trusted(view.lead)}
 </section>
 <nav class="on-this-page" aria-label="On this page">
 <ul>
-${view.sections.map(
+${view.contents.map(
   ({ id, title }) => html`<li><a href="#${id}">${title}</a></li>
 `,
 )}</ul>

@@ -12,8 +12,10 @@ export interface Frame {
 export interface PageParts {
   readonly title: string;
   readonly description: string;
-  /** Name of the navigation entry that this page is; empty for none. */
+  /** Name of the navigation entry that this page is, or below which it stands. */
   readonly current: string;
+  /** True for a page of its own below that entry. */
+  readonly below: boolean;
   /** The series' notice; null when none. */
   readonly notice: string | null;
   readonly body: Piece;
@@ -21,6 +23,7 @@ export interface PageParts {
 
 const NAVIGATION: readonly (readonly [string, string])[] = [
   ["Home", "index.html"],
+  ["Series", "index.html#series"],
   ["Checks", "checks/index.html"],
   ["Register", "register/index.html"],
   ["References", "references/index.html"],
@@ -58,7 +61,7 @@ ${NAVIGATION.map(
   ([
     name,
     path,
-  ]) => html`<li><a href="${frame.root}${path}"${name === page.current && html` aria-current="page"`}>${name}</a></li>
+  ]) => html`<li><a href="${frame.root}${path}"${name === page.current && html` aria-current="${page.below ? "true" : "page"}"`}>${name}</a></li>
 `,
 )}</ul>
 </nav>

@@ -31,6 +31,10 @@ const FILES = [
     "series/one/x-04.md",
     '---\ncode: X-04\nname: open\nstructure: "CC1CCC(O)CC1"\nstereoisomers: enumerate\n---\n',
   ),
+  file(
+    "series/one/x-05.md",
+    '---\ncode: X-05\nname: placed\nstructure: "C[C@H]1CC[C@@H](O)CC1"\nevidence:\n  - observation: seen\n    source: a notebook\n---\nText\n::figure[equilibrium]\n::table[energies]\nand\n\n::derivation[equilibrium]\n\n::table[evidence]\n\n![words](https://example.org/x.png)\n',
+  ),
 ];
 
 let made: ReadonlyMap<string, string>;
@@ -41,7 +45,9 @@ beforeAll(async () => {
   const collection = buildCollection(content, services);
   expect(collection.diagnostics.filter(({ severity }) => severity === "error")).toEqual([]);
   const { pages, diagnostics } = sitePages(collection);
-  expect(diagnostics).toEqual([]);
+  expect(diagnostics.map(({ code, severity, place }) => [code, severity, place.file, place.line])).toEqual([
+    ["picture-not-shown", "caution", "content/series/one/x-05.md", 18],
+  ]);
   made = new Map(pages.map((page) => [page.path, page.render()]));
 });
 
@@ -59,7 +65,7 @@ describe("Pages", () => {
     ]) {
       expect(made.has(name), name).toBe(true);
     }
-    for (const slug of ["x-01", "x-02", "x-03", "x-04"])
+    for (const slug of ["x-01", "x-02", "x-03", "x-04", "x-05"])
       expect(made.has(`series/one/${slug}/index.html`)).toBe(true);
   });
 
@@ -135,6 +141,38 @@ describe("Pages", () => {
       expect(numbers.length).toBeGreaterThan(1);
       expect(numbers).toEqual(numbers.map((_, i) => i + 1));
     }
+  });
+
+  test("mark where the reader stands: the page itself, or what it stands below", () => {
+    const marked = (name: string) =>
+      [...made.get(name)!.matchAll(/aria-current="(\w+)">([^<]+)</g)].map((m) => [m[2], m[1]]);
+    expect(marked("checks/index.html")).toEqual([["Checks", "page"]]);
+    expect(marked("series/one/index.html")).toEqual([["Series", "true"]]);
+    expect(marked("series/one/x-01/index.html")).toEqual([["Series", "true"]]);
+  });
+
+  test("list what a dossier holds, parts placed by the prose included", () => {
+    const text = made.get("series/one/x-05/index.html")!;
+    const list = /<nav class="on-this-page"[\s\S]*?<\/nav>/.exec(text)![0];
+    const entries = [...list.matchAll(/href="#([^"]+)">([^<]+)</g)].map((m) => m[2]);
+    for (const title of ["Energies", "From contributions to populations", "Evidence"])
+      expect(entries).toContain(title);
+    expect(text).toContain('It stands in <a href="#x-05-table-evidence">the text above</a>.');
+    expect(text.match(/id="x-05-table-energies"/g)).toHaveLength(1);
+  });
+
+  test("show the standing and the sources of a register value directly behind it", () => {
+    const titles = [...made.get("register/index.html")!.matchAll(/<thead>\n(.*?)\n<\/thead>/g)].map((m) =>
+      [...m[1]!.matchAll(/<th[^>]*>([^<]+)/g)].map((cell) => cell[1]!.trim()),
+    );
+    for (const columns of titles.filter((list) => list.includes("Sources") && list.includes("Medium")))
+      expect(columns.indexOf("Medium")).toBe(columns.indexOf("Sources") + 1);
+    expect(titles.flat()).toContain("Used by");
+  });
+
+  test("report a picture in prose on the checks page, with its place", () => {
+    expect(made.get("checks/index.html")).toContain("content/series/one/x-05.md:");
+    expect(made.get("checks/index.html")).toContain("picture-not-shown");
   });
 
   test("say plainly when nothing was analysed, and carry the caution everywhere", () => {

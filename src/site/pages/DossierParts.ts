@@ -16,6 +16,8 @@ export class DossierParts {
   private readonly plan: PagePlan;
   private readonly places: RegisterPlaces;
   private drawings = 0;
+  /** Id of each part where it first stands, by name such as `table/energies`. */
+  private readonly ids = new Map<string, string>();
 
   constructor(dossier: Dossier, plan: PagePlan, places: RegisterPlaces) {
     this.dossier = dossier;
@@ -32,6 +34,7 @@ export class DossierParts {
     this.plan.placed.add(key);
     this.drawings += 1;
     const id = `fig-${this.dossier.slug}-${name}${conformer === undefined ? "" : `-${conformer.toLowerCase()}`}${again ? `-${this.drawings}` : ""}`;
+    if (!again) this.ids.set(key, id);
     const { svg, caption } = renderFigure(this.dossier, name, { ...options, idPrefix: `${id}-drawing` });
     const download = conformer === undefined ? [{ href: `figures/${name}.svg`, text: "SVG" }] : [];
     return this.plan.figure(id, svg, caption, download);
@@ -43,8 +46,10 @@ export class DossierParts {
     this.plan.placed.add(`table/${name}`);
     this.drawings += 1;
     const model = TABLES[name]!(this.dossier);
+    const idPrefix = again ? `${this.dossier.slug}-${this.drawings}` : this.dossier.slug;
+    if (!again) this.ids.set(`table/${name}`, `${idPrefix}-table-${model.id}`);
     const table = renderTable(model, {
-      idPrefix: again ? `${this.dossier.slug}-${this.drawings}` : this.dossier.slug,
+      idPrefix,
       number: this.plan.nextTable(),
       rowHref: (row) => this.rowHref(row),
       sourceHref: (key) => `${this.places.root}references/index.html#${registerAnchor(key)}`,
@@ -59,11 +64,16 @@ export class DossierParts {
     const again = this.plan.placed.has("derivation/equilibrium");
     this.plan.placed.add("derivation/equilibrium");
     this.drawings += 1;
-    return renderDerivation(equilibriumDerivation(this.dossier), {
-      headingLevel: 3,
-      idPrefix: again ? `derivation-${this.drawings}` : "derivation",
-      rowHref: (row) => this.rowHref(row),
-    });
+    const idPrefix = again ? `derivation-${this.drawings}` : "derivation";
+    const steps = equilibriumDerivation(this.dossier);
+    if (!again && steps[0] !== undefined)
+      this.ids.set("derivation/equilibrium", `${idPrefix}-${steps[0].id}`);
+    return renderDerivation(steps, { headingLevel: 3, idPrefix, rowHref: (row) => this.rowHref(row) });
+  }
+
+  /** Where a part stands on the page; undefined when it does not. */
+  idOf(key: string): string | undefined {
+    return this.ids.get(key);
   }
 
   has(key: string): boolean {

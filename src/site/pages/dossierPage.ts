@@ -11,6 +11,22 @@ import { PagePlan } from "./PagePlan.ts";
 import type { RegisterPlaces } from "./registerPlaces.ts";
 import { renderProse } from "./renderProse.ts";
 
+/** The parts of every dossier in their order; `key` names what stands for a part that the prose places whole. */
+const STANDARD: readonly { readonly id: string; readonly title: string; readonly key?: string }[] = [
+  { id: "identity", title: "Identity", key: "table/identity" },
+  { id: "conformers", title: "Conformers" },
+  { id: "energies", title: "Energies", key: "table/energies" },
+  { id: "derivation", title: "From contributions to populations", key: "derivation/equilibrium" },
+  { id: "temperature", title: "Population against temperature", key: "figure/temperature" },
+  { id: "members", title: "Stereoisomers that the structure may stand for" },
+  { id: "evidence", title: "Evidence" },
+  { id: "claim", title: "Claim" },
+  { id: "alerts", title: "Checks" },
+  { id: "sources", title: "Sources", key: "table/sources" },
+  { id: "provenance", title: "Provenance" },
+  { id: "downloads", title: "Downloads" },
+];
+
 /** The body of a dossier page. Parts that the prose places are not repeated below it. */
 export function dossierPage(dossier: Dossier, series: Series, places: RegisterPlaces): string {
   const plan = new PagePlan();
@@ -39,6 +55,7 @@ export function dossierPage(dossier: Dossier, series: Series, places: RegisterPl
         return null;
     }
   }).html;
+  const sections = sectionsOf(dossier, parts);
   return dossierBody({
     code: dossier.code,
     name: labelHtml(nameMarkup(dossier.name)),
@@ -49,7 +66,8 @@ export function dossierPage(dossier: Dossier, series: Series, places: RegisterPl
     stops: dossier.alerts.filter(({ severity }) => severity === "stop").map(({ message }) => message),
     lead,
     prose,
-    sections: sectionsOf(dossier, parts),
+    sections,
+    contents: contentsOf(sections, parts),
     neighbours: neighboursOf(dossier, series),
   }).markup;
 }
@@ -62,6 +80,14 @@ function neighboursOf(dossier: Dossier, series: Series): DossierView["neighbours
     ...entry("Previous", index > 0 ? series.dossiers[index - 1] : undefined),
     ...entry("Next", series.dossiers[index + 1]),
   ];
+}
+
+/** The standard parts in their order, those that the prose places included. */
+function contentsOf(sections: readonly Section[], parts: DossierParts): DossierView["contents"] {
+  return STANDARD.flatMap(({ id, title, key }) => {
+    const anchor = sections.some((section) => section.id === id) ? id : key && parts.idOf(key);
+    return anchor === undefined ? [] : [{ id: anchor, title }];
+  });
 }
 
 function missing(text: string): string {
@@ -77,45 +103,40 @@ function statusOf(dossier: Dossier): string {
 }
 
 function sectionsOf(dossier: Dossier, parts: DossierParts): readonly Section[] {
-  const sections: Section[] = [];
-  const add = (id: string, title: string, content: readonly (string | null)[]) => {
-    const text = content.filter((piece) => piece !== null && piece !== "").join("\n");
-    if (text !== "") sections.push({ id, title, content: text });
-  };
   const once = (key: string, make: () => string | null) => (parts.has(key) ? null : make());
+  const figure = (name: FigureName) => once(`figure/${name}`, () => parts.figure(name));
+  const table = (name: string) => once(`table/${name}`, () => parts.table(name));
   const analysed = dossier.conformers.length > 0;
-  add("identity", "Identity", [
-    once("figure/wedge", () => parts.figure("wedge")),
-    once("table/identity", () => parts.table("identity")),
-    dossier.identity.stereocentres.length > 0 ? parts.table("stereocentres") : null,
-  ]);
-  if (analysed) {
-    add("conformers", "Conformers", [parts.table("conformers")]);
-    add("energies", "Energies", [once("table/energies", () => parts.table("energies"))]);
-    add("derivation", "From contributions to populations", [
-      once("derivation/equilibrium", () => parts.derivation()),
-    ]);
-    add("temperature", "Population against temperature", [
-      once("figure/temperature", () => parts.figure("temperature")),
-      once("table/temperature", () => parts.table("temperature")),
-    ]);
-  }
-  if (dossier.members.length > 0)
-    add("members", "Stereoisomers that the structure may stand for", [parts.table("members")]);
-  add("evidence", "Evidence", [
-    dossier.evidence.length === 0
-      ? "<p>No evidence is recorded.</p>"
-      : "<p>As recorded by the author; not yet compared with the calculation.</p>",
-    dossier.evidence.length === 0 ? null : once("table/evidence", () => parts.table("evidence")),
-  ]);
-  add("claim", "Claim", [claimOf(dossier)]);
-  add("alerts", "Checks", [alertsOf(dossier)]);
-  add("sources", "Sources", [
-    dossier.sources.length === 0 ? null : once("table/sources", () => parts.table("sources")),
-  ]);
-  add("provenance", "Provenance", [provenanceOf(dossier)]);
-  add("downloads", "Downloads", [downloadsOf(dossier)]);
-  return sections;
+  const content: Record<string, () => readonly (string | null)[]> = {
+    identity: () => [
+      figure("wedge"),
+      table("identity"),
+      dossier.identity.stereocentres.length > 0 ? table("stereocentres") : null,
+    ],
+    conformers: () => [analysed ? table("conformers") : null],
+    energies: () => [analysed ? table("energies") : null],
+    derivation: () => [analysed ? once("derivation/equilibrium", () => parts.derivation()) : null],
+    temperature: () => (analysed ? [figure("temperature"), table("temperature")] : []),
+    members: () => [dossier.members.length > 0 ? table("members") : null],
+    evidence: () => {
+      if (dossier.evidence.length === 0) return ["<p>No evidence is recorded.</p>"];
+      const placed = parts.idOf("table/evidence");
+      const where = placed === undefined ? "" : ` It stands in <a href="#${placed}">the text above</a>.`;
+      return [
+        `<p>As recorded by the author; not yet compared with the calculation.${where}</p>`,
+        table("evidence"),
+      ];
+    },
+    claim: () => [claimOf(dossier)],
+    alerts: () => [alertsOf(dossier)],
+    sources: () => [dossier.sources.length === 0 ? null : table("sources")],
+    provenance: () => [provenanceOf(dossier)],
+    downloads: () => [downloadsOf(dossier)],
+  };
+  return STANDARD.flatMap(({ id, title }): Section[] => {
+    const pieces = content[id]!().filter((piece) => piece !== null && piece !== "");
+    return pieces.length === 0 ? [] : [{ id, title, content: pieces.join("\n") }];
+  });
 }
 
 function claimOf(dossier: Dossier): string {

@@ -1,20 +1,20 @@
-import type { Dossier } from "../../dossier/Dossier.ts";
+import type { Conformer, Dossier } from "../../dossier/Dossier.ts";
 import { formatEnergy } from "../../quantity/formatEnergy.ts";
-import { formatInterval } from "../../quantity/formatInterval.ts";
 import { formatK } from "../../quantity/formatK.ts";
 import { formatPopulation } from "../../quantity/formatPopulation.ts";
 import { formatTemperature } from "../../quantity/formatTemperature.ts";
+import { joinInterval } from "../../quantity/joinInterval.ts";
+import { nameMarkup } from "../../quantity/nameMarkup.ts";
+import { roundPopulation } from "../../quantity/roundPopulation.ts";
 
 /** The words a `:value[…]` directive stands for, label markup allowed; says so when there is none. */
 export function dossierValue(dossier: Dossier, name: string): string {
   const [major, minor] = dossier.conformers;
   const equilibrium = dossier.equilibria[0];
   const missing = "not available";
-  const percent = ([low, high]: readonly [number, number]) =>
-    formatInterval([Math.round(low * 1000) / 10, Math.round(high * 1000) / 10], "%");
   switch (name) {
     case "name":
-      return dossier.name;
+      return nameMarkup(dossier.name);
     case "code":
       return dossier.code;
     case "temperature":
@@ -28,9 +28,9 @@ export function dossierValue(dossier: Dossier, name: string): string {
     case "population.minor":
       return minor === undefined ? missing : formatPopulation(minor.population, minor.population95);
     case "interval.major":
-      return major === undefined ? missing : percent(major.population95);
+      return major === undefined ? missing : intervalOf(major);
     case "interval.minor":
-      return minor === undefined ? missing : percent(minor.population95);
+      return minor === undefined ? missing : intervalOf(minor);
     case "deltaG":
       return equilibrium === undefined
         ? missing
@@ -46,4 +46,11 @@ export function dossierValue(dossier: Dossier, name: string): string {
     default:
       throw new RangeError(`no value is called ${name}`);
   }
+}
+
+/** Rounded as in the tables, so that no value in a sentence says more than they do. */
+function intervalOf({ population, population95 }: Conformer): string {
+  const { low, high, value, exact } = roundPopulation(population, population95);
+  if (exact) return `${value}\u00a0% (exact by symmetry)`;
+  return `${low === high && /^[<>]/.test(low) ? low : joinInterval(low, high)}\u00a0%`;
 }

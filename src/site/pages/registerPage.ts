@@ -19,7 +19,7 @@ export function registerPage(collection: Collection): string {
   const sections = registerTables(collection.register).map((model) => ({
     id: `kind-${model.id}`,
     title: model.caption,
-    content: `<div class="wide">${renderTable(withUses(model, uses), {
+    content: `<div class="wide">${renderTable(withUses(sourceFirst(model), uses), {
       // Cells that list dossiers are linked by the same means as those that list sources.
       sourceHref: (key) => dossiers.get(key) ?? `../references/index.html#${registerAnchor(key)}`,
     })}</div>`,
@@ -50,6 +50,23 @@ function usesByAnchor(collection: Collection): ReadonlyMap<string, readonly stri
     }
   }
   return uses;
+}
+
+/** Standing and sources directly behind the value, so that a narrow screen never shows a number without them. */
+function sourceFirst(model: TableModel): TableModel {
+  const moved = ["standing", "sources"];
+  const medium = model.columns.findIndex(({ key }) => key === "medium");
+  if (medium === -1) return model;
+  const rank = (index: number) => (moved.includes(model.columns[index]!.key) ? medium - 0.5 : index);
+  const order = model.columns.map((_, index) => index).sort((a, b) => rank(a) - rank(b) || a - b);
+  return {
+    ...model,
+    columns: order.map((index) => model.columns[index]!),
+    rows: model.rows.map((row) => ({
+      ...row,
+      cells: order.map((index) => row.cells[index] ?? { text: "" }),
+    })),
+  };
 }
 
 function withUses(model: TableModel, uses: ReadonlyMap<string, readonly string[]>): TableModel {

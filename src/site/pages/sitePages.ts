@@ -47,7 +47,7 @@ export function sitePages(collection: Collection): {
             program: `${collection.program.name} ${collection.program.version}`,
             registerVersion: collection.register.version,
           },
-          { title, description, current, notice, body: trusted(body()) },
+          { title, description, current, below: current === "Series", notice, body: trusted(body()) },
         ).markup,
     };
   };
@@ -81,7 +81,7 @@ export function sitePages(collection: Collection): {
         `${folder}/index.html`,
         `${series.title} · ${collection.title}`,
         series.summary,
-        "",
+        "Series",
         series.notice,
         () => seriesPage(series),
       ),
@@ -91,7 +91,7 @@ export function sitePages(collection: Collection): {
           `${folder}/${dossier.slug}/index.html`,
           `${dossier.code} ${dossier.name} · ${series.title}`,
           `Conformational analysis of ${dossier.name}`,
-          "",
+          "Series",
           series.notice,
           () => dossierPage(dossier, series, { root: "../../../", anchors }),
         ),
