@@ -88,7 +88,7 @@ describe("Pages", () => {
         "no-trailing-whitespace": "off",
         "svg-focusable": "off",
         "no-implicit-button-type": "off",
-        "element-permitted-content": "off",
+
         "prefer-native-element": "off",
         "tel-non-breaking": "off",
       },
