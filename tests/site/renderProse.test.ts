@@ -1,3 +1,4 @@
+import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { renderProse } from "../../src/site/pages/renderProse.ts";
 
@@ -64,5 +65,55 @@ describe("Other things in prose", () => {
   test("headings begin below the title of the page and keep their order", () => {
     expect(htmlOf("# One\n\n## Two")).toBe("<h2>One</h2>\n<h3>Two</h3>\n");
     expect(htmlOf("## One\n\n### Two")).toBe("<h2>One</h2>\n<h3>Two</h3>\n");
+  });
+});
+
+describe("Whatever an author writes", () => {
+  const piece = fc.constantFrom(
+    "::figure[wedge]",
+    ":value[name]",
+    "&#xE000;0&#xE001;",
+    "\u{E000}",
+    "[a](",
+    '](b ":value[name]")',
+    "![",
+    "](http://x/:value[name])",
+    "`",
+    "$",
+    "$$",
+    "**",
+    "_",
+    "> ",
+    "- ",
+    "1. ",
+    "# ",
+    "    ",
+    "\n",
+    "\n\n",
+    "<b>",
+    "<img src=x>",
+    "| a |",
+    "---",
+    "|",
+    "text",
+    " ",
+    "%E0%A4",
+    "[r]: x",
+  );
+
+  test("is set without an exception, an element of the author's making, or a figure inside running text", () => {
+    fc.assert(
+      fc.property(fc.array(piece, { maxLength: 24 }), (pieces) => {
+        const markdown = pieces.join("");
+        const { html, problems, pictures } = set(markdown);
+        expect(html).not.toMatch(/<(img|b|script)\b/);
+        // Outside what the program itself placed, no attribute was left open: quotes pair up in every tag.
+        for (const [tag] of html.replaceAll(MARKUP, "").matchAll(/<[a-z][^>]*>/g))
+          expect((tag.match(/"/g) ?? []).length % 2, tag).toBe(0);
+        for (const { line } of [...problems, ...pictures])
+          expect(line).toBeLessThanOrEqual(markdown.split("\n").length);
+      }),
+      { numRuns: 400 },
+    );
   });
 });
