@@ -1,7 +1,7 @@
 import type { MediumClass, Standing } from "../register/Register.ts";
 
 /** Raised whenever the meaning or shape of a record changes; readers of older versions are kept. */
-export const DOSSIER_SCHEMA_VERSION = 1;
+export const DOSSIER_SCHEMA_VERSION = 2;
 
 /**
  * Everything known about one compound: plain, frozen, versioned data, the waist of the program.
@@ -33,10 +33,13 @@ export interface Dossier {
   readonly identity: Identity;
   readonly structure: Structure;
   readonly rings: readonly Ring[];
+  /** The ring systems that hold analysed rings. */
+  readonly systems: readonly RingSystem[];
   /** Most stable first; empty when `alerts` holds a `stop` that says why. */
   readonly conformers: readonly Conformer[];
   /** Relation of the two chairs of a single flexible ring; null when there is no such pair. */
   readonly relation: ChairRelation | null;
+  readonly kinship: Kinship;
   /** Free-energy difference and equilibrium constant of each conformer against the first. */
   readonly equilibria: readonly Equilibrium[];
   /** Ascending temperature; the dossier's own temperature is always among them. */
@@ -51,6 +54,41 @@ export interface Dossier {
   readonly review: readonly ReviewEntry[];
   /** Every source used above, sorted by key. */
   readonly sources: readonly SourceNote[];
+}
+
+/** How the listed conformers are related to each other. */
+export interface Kinship {
+  /** How many are distinct when superimposable ones count once. */
+  readonly distinct: number;
+  /** How many are distinct when mirror images count once too. */
+  readonly distinctUpToMirror: number;
+  /** Pairs that are superimposable or mirror images; every other pair is diastereomeric. */
+  readonly pairs: readonly {
+    readonly first: string;
+    readonly second: string;
+    readonly relation: "identical" | "enantiomeric";
+  }[];
+}
+
+/** Rings joined by shared atoms. */
+export interface RingSystem {
+  readonly index: number;
+  /** Analysed rings in it, as indices into the dossier's rings. */
+  readonly rings: readonly number[];
+  /** All its ring atoms, ascending; rings of any size and kind. */
+  readonly atoms: readonly number[];
+  readonly bonds: readonly {
+    readonly from: number;
+    readonly to: number;
+    readonly order: 1 | 2 | 3;
+    readonly aromatic: boolean;
+  }[];
+  /** Bonds that an analysed ring shares with another ring between two tetrahedral atoms, and how they are fused. */
+  readonly fusions: readonly {
+    readonly atoms: readonly [number, number];
+    readonly locants: readonly [string, string];
+    readonly relation: "cis" | "trans";
+  }[];
 }
 
 export type ChairRelation = "identical" | "enantiomeric" | "diastereomeric";
@@ -126,12 +164,24 @@ export interface Ring {
    * Faces are seen from the side from which this list runs clockwise.
    */
   readonly atoms: readonly number[];
-  /** Locants of `atoms`, in the same order; `1` … `6`, primed in further rings. */
+  /** Printed locants of `atoms`, in the same order: `1` … `6`, `4a`, primed in further rings without a common numbering. */
   readonly locants: readonly string[];
+  /** Index of the ring system it belongs to. */
+  readonly system: number;
+  /** What states it has: two chairs, two half-chairs (one bond held flat), or the boat that a bridge forces. */
+  readonly kind: "chair" | "half-chair" | "boat";
   readonly parent: string;
   /** Register ring key, with the nitrogen's variant: `piperidine/NH`. */
   readonly ringKey: string;
   readonly substituents: readonly RingSubstituent[];
+  /** Bonds from tetrahedral ring atoms to atoms of other rings of the system, which are axial or equatorial too. */
+  readonly branches: readonly {
+    readonly ringAtom: number;
+    readonly atom: number;
+    readonly locant: string;
+    /** Locant of the other atom; empty where it has none. */
+    readonly towards: string;
+  }[];
   /** cis/trans of every pair of substituted ring atoms that carry one group each. */
   readonly configuration: readonly {
     readonly locants: readonly [string, string];
@@ -144,7 +194,7 @@ export interface RingSubstituent {
   readonly ringAtom: number;
   readonly atom: number;
   readonly locant: string;
-  /** null where the atom inverts (nitrogen) and so has no lasting face. */
+  /** null where the atom inverts (nitrogen) or is trigonal and so has no lasting face. */
   readonly face: "up" | "down" | null;
   /** Register key, or null for a group the register does not know. */
   readonly group: string | null;
@@ -160,7 +210,7 @@ export interface Conformer {
   readonly id: string;
   /** Locants with a or e: `1e,4e`; group in brackets where two groups share a ring atom. */
   readonly label: string;
-  readonly rings: readonly { readonly ring: number; readonly form: "chair" }[];
+  readonly rings: readonly { readonly ring: number; readonly form: RingForm }[];
   readonly positions: readonly Position[];
   /** Relative to conformer A, kJ/mol, with standard uncertainty of the difference. */
   readonly deltaG_kJ_mol: number;
@@ -170,8 +220,58 @@ export interface Conformer {
   readonly population: number;
   readonly population95: readonly [number, number];
   readonly contributions: readonly Contribution[];
-  /** Coordinates in Å of ring atoms, their hydrogens and the first atom of each group. */
+  /** Ideal coordinates in Å for drawing: ring atoms of each system, their hydrogens, the first atom of each group. */
   readonly geometry: Geometry;
+  /** The whole molecule relaxed by mechanics; null where no mechanics ran. */
+  readonly relaxed: RelaxedGeometry | null;
+  /** Shares of the two places of each N–H in this conformer. */
+  readonly nitrogens: readonly NitrogenPlaces[];
+}
+
+export type RingForm = "chair" | "half-chair" | "boat" | "twist-boat";
+
+/** Where the hydrogen of a secondary ring amine stands: two states that a conformer holds together. */
+export interface NitrogenPlaces {
+  readonly ring: number;
+  readonly atom: number;
+  readonly locant: string;
+  /** Fraction with the hydrogen equatorial, with its 95 % interval. */
+  readonly equatorial: number;
+  readonly equatorial95: readonly [number, number];
+  readonly source: string;
+}
+
+/** One conformer of the whole molecule after relaxation. */
+export interface RelaxedGeometry {
+  /** Force field: `MMFF94s`. */
+  readonly method: string;
+  /** Å; atoms in input order, then hydrogens with `atom` null. */
+  readonly atoms: readonly {
+    readonly element: string;
+    readonly atom: number | null;
+    readonly x: number;
+    readonly y: number;
+    readonly z: number;
+  }[];
+  readonly puckering: readonly RingPuckering[];
+}
+
+/** Shape of one ring in numbers (Cremer and Pople, J. Am. Chem. Soc. 1975, 97, 1354). */
+export interface RingPuckering {
+  readonly ring: number;
+  /** Locants in the order that the numbers refer to. */
+  readonly locants: readonly string[];
+  /** Endocyclic torsion about the bond from each atom of that order to the next, degrees. */
+  readonly torsions_deg: readonly number[];
+  readonly Q_A: number;
+  readonly theta_deg: number;
+  /** null near θ = 0° and 180°, where it has no meaning. */
+  readonly phi_deg: number | null;
+  /** IUPAC symbol where the ring has sugar numbering, label markup: `^4C_1`. */
+  readonly symbol: string | null;
+  /** Nearest canonical form in words, and its angular distance on the sphere of forms, degrees. */
+  readonly nearest: string;
+  readonly distance_deg: number;
 }
 
 export interface Position {
@@ -180,9 +280,13 @@ export interface Position {
   /** First atom of the group. */
   readonly substituent: number;
   readonly locant: string;
+  /** A group, or a bond into another ring of the system. */
+  readonly kind: "group" | "ring bond";
   /** Label for print, attached atom first. */
   readonly group: string;
   readonly orientation: Orientation;
+  /** True next to a flat bond, where the words are pseudoaxial and pseudoequatorial. */
+  readonly pseudo: boolean;
   readonly face: "up" | "down";
 }
 
@@ -193,6 +297,8 @@ export type ContributionKind =
   | "syn-axial"
   | "geminal"
   | "nitrogen substituent"
+  | "ring fusion"
+  | "non-chair form"
   | "additivity allowance";
 
 export type Basis = "published" | "computed" | "not available";
@@ -309,6 +415,8 @@ export interface Geometry {
     readonly atom: number | null;
     /** The ring atom it hangs on; null for a ring atom. */
     readonly parent: number | null;
+    /** Ring system whose frame the coordinates are in. */
+    readonly system: number;
     readonly x: number;
     readonly y: number;
     readonly z: number;

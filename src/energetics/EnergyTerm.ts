@@ -7,6 +7,8 @@ export type TermKind =
   | "syn-axial"
   | "geminal"
   | "nitrogen substituent"
+  | "ring fusion"
+  | "non-chair form"
   | "additivity allowance";
 
 /** One line of the energy table of one conformer: a sum of parameters with their factors. */

@@ -15,7 +15,7 @@ export interface Parameter {
   readonly id: string;
   /** @param temperature - in K. */
   readonly at: (temperature: number) => ParameterValue;
-  readonly basis: "published" | "not available";
+  readonly basis: "published" | "computed" | "not available";
   readonly standing: Standing | null;
   readonly sources: readonly string[];
   /** Medium as printed in the register, or what the stand-in assumes. */

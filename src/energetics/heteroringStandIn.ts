@@ -10,7 +10,9 @@ import { classOf, nameOf, similarGroups } from "./siteGroup.ts";
 import { borrowed, standIn } from "./standIn.ts";
 
 /** Extra standard uncertainties in kcal/mol, by what is missing. */
-const LOAN = { sameClass: 0.3, otherState: 0.3, otherRing: 0.4, strongDipole: 1.0 };
+const LOAN = { sameClass: 0.3, otherState: 0.3, otherRing: 0.4, strongDipole: 1.0, allylic: 1.5 };
+/** A half-chair leaves an axial group fewer hydrogens to meet: share of the cyclohexane value, and its doubt (kcal/mol). */
+const HALF_CHAIR = { share: 0.6, u: 0.5 };
 /** Temperature at which a stand-in built from several rows is evaluated, K. */
 const REFERENCE_TEMPERATURE = 298.15;
 
@@ -42,12 +44,36 @@ export function heteroringStandIn(
       return lend(match, LOAN.sameClass, `that of ${similar}, a group of the same class, stands in.`);
   }
   const { carbon, polar } = classOf(context.register, substituent);
+  const flat = besideFlat(ring, substituent);
+  if (flat === "nitrogen" && carbon && !polar) {
+    for (const key of [substituent.group?.key ?? "", "Me"]) {
+      const match = axialRow(context.register, {
+        ...context,
+        ring: "piperidine/NAcyl",
+        locant: 2,
+        group: key,
+      });
+      if (match !== undefined)
+        return lend(
+          match,
+          LOAN.sameClass,
+          `that of ${key} beside the N-acyl nitrogen of piperidine stands in.`,
+        );
+    }
+  }
   for (const other of otherStates(context, ring, polar)) {
     const match = substituent.group === null ? undefined : lookup(other, substituent.group.key);
     if (match !== undefined) return lend(match, LOAN.otherState, `that of ${other} stands in.`);
   }
 
   const base = cyclohexaneParameter(context, substituent);
+  if (ring.kind === "half-chair" && flat === null) {
+    const at = base.at(REFERENCE_TEMPERATURE);
+    const value = toKilocalorie(at.value) * HALF_CHAIR.share;
+    const why = `${missing}; ${HALF_CHAIR.share} of its cyclohexane value stands in for a half-chair.`;
+    const u = Math.hypot(toKilocalorie(at.u), HALF_CHAIR.u);
+    return { parameter: { ...standIn(id, value, u, why), sources: base.sources }, anomeric: false };
+  }
   const methyl = lookup(ring.ringKey, "Me");
   const carbocycle = axialRow(context.register, { ...context, ring: "cyclohexane", locant: 1, group: "Me" });
   if (carbon && !polar && methyl !== undefined && carbocycle !== undefined) {
@@ -61,12 +87,15 @@ export function heteroringStandIn(
   }
   const beside = polar && isBesideHeteroatom(ring, substituent);
   const charged = polar && ring.ringKey.endsWith("+");
-  const extra = beside || charged ? LOAN.strongDipole : LOAN.otherRing;
-  const reason = beside
-    ? " An anomeric effect is likely and may reverse the sign."
-    : charged
-      ? " The ring's charge may hold the group axial."
-      : "";
+  const extra = flat !== null ? LOAN.allylic : beside || charged ? LOAN.strongDipole : LOAN.otherRing;
+  const reason =
+    flat !== null
+      ? " Strain with what the flat atom carries (allylic 1,3-strain) may hold the group axial."
+      : beside
+        ? " An anomeric effect is likely and may reverse the sign."
+        : charged
+          ? " The ring's charge may hold the group axial."
+          : "";
   return {
     parameter: borrowed(base, id, extra, `${missing}; its cyclohexane value stands in.${reason}`),
     anomeric: false,
@@ -84,4 +113,12 @@ function otherStates(context: EnergyContext, ring: AnalysedRing, polar: boolean)
 function isBesideHeteroatom(ring: AnalysedRing, substituent: Substituent): boolean {
   const position = ring.atoms.indexOf(substituent.ringAtom);
   return [1, 5].some((step) => !ring.carbons.includes(ring.atoms[(position + step) % 6]!));
+}
+
+/** What flat atom stands beside the group's ring atom: a planar nitrogen, another one, or none. */
+function besideFlat(ring: AnalysedRing, substituent: Substituent): "nitrogen" | "other" | null {
+  const position = ring.atoms.indexOf(substituent.ringAtom);
+  const flat = [1, 5].map((step) => (position + step) % 6).filter((at) => ring.flatAtoms.includes(at));
+  if (flat.length === 0) return null;
+  return flat.some((at) => ring.elements[at] === "N") ? "nitrogen" : "other";
 }

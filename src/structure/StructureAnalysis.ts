@@ -1,6 +1,8 @@
 import type { Group } from "../register/Register.ts";
+import type { RingKind } from "./findRings.ts";
 import type { Molecule } from "./Molecule.ts";
 import type { RingSite } from "./ringFaces.ts";
+import type { RingPartner } from "./ringPartners.ts";
 
 /** A group on an analysed ring. */
 export interface Substituent {
@@ -20,13 +22,24 @@ export interface Substituent {
   readonly mirrorForm: string;
 }
 
-/** A saturated six-membered ring that stands alone, with faces, locants and groups. */
+/** A six-membered ring whose states are known, alone or in a ring system, with faces, locants and groups. */
 export interface AnalysedRing {
   readonly index: number;
+  readonly kind: RingKind;
+  /** Index of its ring system. */
+  readonly system: number;
   /** From the lowest atom, in the direction of rising locants; clockwise seen from the up face. */
   readonly atoms: readonly number[];
-  /** Locants 1…6 of `atoms`. */
+  /** Locants 1…6 of `atoms` in the ring's own parent, by which the register is read. */
   readonly locants: readonly number[];
+  /** Locants of `atoms` as printed: those of the whole ring system or the author's own where there are any. */
+  readonly names: readonly string[];
+  /** Ring bonds k (atom k to atom k + 1 of `atoms`) held flat. */
+  readonly flatBonds: readonly number[];
+  /** Positions of trigonal atoms in `atoms`. */
+  readonly flatAtoms: readonly number[];
+  /** Other rings that share atoms with this one. */
+  readonly partners: readonly RingPartner[];
   readonly parent: string;
   readonly ringKey: string;
   /** Element symbols of `atoms`. */
@@ -37,7 +50,12 @@ export interface AnalysedRing {
   readonly inverting: readonly number[];
   /** In the order of `atoms`. */
   readonly sites: readonly RingSite[];
+  /** Groups on tetrahedral atoms, which are axial or equatorial in a chair. */
   readonly substituents: readonly Substituent[];
+  /** Bonds to atoms of other rings of the system, each described as the open-chain group it resembles. */
+  readonly branches: readonly Substituent[];
+  /** Groups on trigonal atoms (=O, =CH2, N-acyl …), which are neither axial nor equatorial. */
+  readonly flatGroups: readonly Substituent[];
 }
 
 /** Everything later rooms need to know of a structure; all senses that matter are filled in. */

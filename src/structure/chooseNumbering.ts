@@ -75,5 +75,5 @@ function lettersOf(prefix: string): string {
 /** The same walk around the ring, begun at its lowest atom. */
 function fromLowestAtom(numbering: readonly number[]): readonly number[] {
   const start = numbering.indexOf(Math.min(...numbering));
-  return numbering.map((_, step) => numbering[(start + step) % 6]!);
+  return numbering.map((_, step) => numbering[(start + step) % numbering.length]!);
 }

@@ -1,3 +1,4 @@
+import { bridgesFit } from "./bridgesFit.ts";
 import { bondBetween, type Molecule, mirrorImage, type TetrahedralSense, withSenses } from "./Molecule.ts";
 import type { Toolkit } from "./Toolkit.ts";
 
@@ -40,24 +41,33 @@ export function findOpenCentres(molecule: Molecule, toolkit: Toolkit): OpenStere
 
   const combinations = 2 ** candidates.length;
   const filled: Molecule[] = [];
-  const forms: string[] = [];
+  // null where a bridge forbids the combination.
+  const forms: (string | null)[] = [];
   for (let code = 0; code < combinations; code++) {
     const senses = new Map<number, TetrahedralSense>(
       candidates.map((atom, bit) => [atom, (code >> bit) & 1 ? "cw" : "ccw"]),
     );
     const next = withSenses(molecule, senses);
     filled.push(next);
-    forms.push(toolkit.canonicalSmiles(next));
+    forms.push(bridgesFit(next) ? toolkit.canonicalSmiles(next) : null);
   }
+  if (forms.every((form) => form === null))
+    return { centres: [], members: [member(molecule)], complete: true };
   const centres = candidates.filter((_, bit) =>
-    forms.some((form, code) => form !== forms[code ^ (1 << bit)]),
+    forms.some((form, code) => differs(form, forms[code ^ (1 << bit)]!)),
   );
+  // Two bridgeheads turn over together; where that makes another substance both are open.
   const distinct = new Map<string, Molecule>();
   forms.forEach((form, code) => {
-    if (!distinct.has(form)) distinct.set(form, filled[code]!);
+    if (form !== null && !distinct.has(form)) distinct.set(form, filled[code]!);
   });
+  const open = centres.length === 0 && distinct.size > 1 ? candidates : centres;
   const members = [...distinct.keys()].sort().map((form) => member(distinct.get(form)!));
-  return { centres, members, complete: true };
+  return { centres: open, members, complete: true };
+}
+
+function differs(a: string | null, b: string | null): boolean {
+  return a !== null && b !== null && a !== b;
 }
 
 /** True for an atom without a sense that could hold one: four different-looking places, or a stable pyramid. */

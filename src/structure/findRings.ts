@@ -1,14 +1,19 @@
-import { type Atom, bondBetween, type Molecule } from "./Molecule.ts";
+import { flatParts, isTrigonal } from "./flatAtoms.ts";
+import { bondBetween, type Molecule } from "./Molecule.ts";
+import { type RingPartner, ringPartners } from "./ringPartners.ts";
+import { sixCycles } from "./sixCycles.ts";
 
-/** Ring elements for which a chair with ordinary axial and equatorial positions is sound. */
+/** Ring elements for which axial and equatorial positions are sound. */
 const RING_ELEMENTS = new Set(["C", "N", "O", "S", "Se", "Te", "Si", "Ge", "Sn", "Pb", "P", "As"]);
+/** Longest bridge, in atoms, that decides the shape of the ring it spans. */
+const LONGEST_DECIDING_BRIDGE = 6;
 
 export type RingRefusalCode =
   | "unsupported-no-six-ring"
   | "unsupported-unsaturated-ring"
-  | "unsupported-planar-nitrogen"
-  | "unsupported-fused-ring"
-  | "unsupported-spiro-ring"
+  | "unsupported-lactone-ring"
+  | "unsupported-lactam-ring"
+  | "unsupported-flat-corners"
   | "unsupported-bridged-ring"
   | "unsupported-ring-element";
 
@@ -17,152 +22,145 @@ export interface RingRefusal {
   readonly message: string;
 }
 
-/** The saturated six-membered rings that stand alone, or why the molecule is not analysed. */
+/**
+ * What states a ring has: two chairs; two half-chairs, one bond being held flat; or one boat, which a bridge between
+ * opposite atoms forces on it.
+ */
+export type RingKind = "chair" | "half-chair" | "boat";
+
+export interface FoundRing {
+  readonly atoms: readonly number[];
+  readonly kind: RingKind;
+  /** Ring bonds k (atom k to atom k + 1 of `atoms`) held flat. */
+  readonly flatBonds: readonly number[];
+  /** Positions of trigonal atoms in `atoms`. */
+  readonly flatAtoms: readonly number[];
+  readonly partners: readonly RingPartner[];
+}
+
+/** The six-membered rings whose states are known, or why there are none. */
 export type RingSearch =
   | {
       readonly ok: true;
-      readonly rings: readonly (readonly number[])[];
+      readonly rings: readonly FoundRing[];
       readonly unanalysed: readonly RingRefusal[];
     }
   | { readonly ok: false; readonly refusal: RingRefusal };
 
 /**
- * Finds every saturated six-membered ring and makes sure that each can be treated as a free chair.
- *
- * A six-membered ring with an sp2 atom, a planar nitrogen, or atoms shared with another ring is not
- * analysed yet. One saturated ring of that kind refuses the whole molecule, since its conformers would
- * be missing from the count; an unsaturated six-membered ring elsewhere is only reported.
+ * Finds every six-membered ring that has chairs, half-chairs or a forced boat. A six-membered ring of another kind
+ * is reported by name; beside a ring that is analysed it counts as a flexible partner.
  */
 export function findRings(molecule: Molecule): RingSearch {
-  const sixRings = molecule.rings.filter((ring) => ring.length === 6);
-  const accepted: number[][] = [];
+  const rings: FoundRing[] = [];
   const unanalysed: RingRefusal[] = [];
-  for (const ring of sixRings) {
-    const atoms = ring.map((index) => molecule.atoms[index]!);
-    if (atoms.every((atom) => atom.aromatic)) continue;
-    const unsaturated = unsaturation(molecule, ring, atoms);
-    if (unsaturated !== null) {
-      unanalysed.push(unsaturated);
-      continue;
-    }
-    const shared = sharing(molecule, ring);
-    if (shared !== null) return { ok: false, refusal: shared };
-    const odd = atoms.find((atom) => !RING_ELEMENTS.has(atom.element) || atom.radicals > 0);
-    if (odd !== undefined) {
-      return {
-        ok: false,
-        refusal: {
-          code: "unsupported-ring-element",
-          message: `A six-membered ring with ${odd.radicals > 0 ? "a radical centre" : odd.element} at atom ${odd.index} is not analysed.`,
-        },
-      };
-    }
-    accepted.push([...ring]);
+  for (const ring of sixCycles(molecule)) {
+    if (ring.every((atom) => molecule.atoms[atom]!.aromatic)) continue;
+    const found = classify(molecule, ring);
+    if ("code" in found) unanalysed.push(found);
+    else rings.push(found);
   }
-  if (accepted.length > 0) {
-    const planar = unanalysed.find((refusal) => refusal.code === "unsupported-planar-nitrogen");
-    if (planar !== undefined) return { ok: false, refusal: planar };
-    accepted.sort((a, b) => Math.min(...a) - Math.min(...b));
-    return { ok: true, rings: accepted, unanalysed };
-  }
-  if (hiddenSixRing(molecule)) {
-    return {
-      ok: false,
-      refusal: {
-        code: "unsupported-bridged-ring",
-        message: "The molecule holds a six-membered ring inside a bridged system; not analysed yet.",
-      },
-    };
+  if (rings.length > 0) {
+    const byAtoms = (a: FoundRing, b: FoundRing) => compareAtoms(a.atoms, b.atoms);
+    return { ok: true, rings: rings.sort(byAtoms), unanalysed };
   }
   const refusal = unanalysed[0] ?? {
     code: "unsupported-no-six-ring" as const,
-    message: "The molecule has no saturated six-membered ring.",
+    message: "The molecule has no six-membered ring with chairs or half-chairs.",
   };
   return { ok: false, refusal };
 }
 
-/** A six-membered path around a bridge that the smallest rings do not list, as in norbornane. */
-function hiddenSixRing(molecule: Molecule): boolean {
-  return molecule.rings.some((a, i) =>
-    molecule.rings.slice(i + 1).some((b) => {
-      const common = a.filter((atom) => b.includes(atom)).length;
-      return common > 2 && a.length + b.length - 2 * (common - 1) === 6;
-    }),
-  );
+function compareAtoms(a: readonly number[], b: readonly number[]): number {
+  const [x, y] = [[...a].sort((m, n) => m - n), [...b].sort((m, n) => m - n)];
+  const at = x.findIndex((atom, i) => atom !== y[i]);
+  return at < 0 ? 0 : x[at]! - y[at]!;
 }
 
-function unsaturation(
+function classify(molecule: Molecule, ring: readonly number[]): FoundRing | RingRefusal {
+  const where = `The six-membered ring of atoms ${ring.join(", ")}`;
+  const refuse = (code: RingRefusalCode, what: string): RingRefusal => ({
+    code,
+    message: `${where} ${what}; it is not analysed.`,
+  });
+  const odd = ring
+    .map((index) => molecule.atoms[index]!)
+    .find((atom) => !RING_ELEMENTS.has(atom.element) || atom.radicals > 0);
+  if (odd !== undefined) {
+    return refuse(
+      "unsupported-ring-element",
+      `holds ${odd.radicals > 0 ? "a radical centre" : odd.element} at atom ${odd.index}`,
+    );
+  }
+  const partners = ringPartners(molecule, ring);
+  if (partners === null) return refuse("unsupported-bridged-ring", "is part of a cage of small rings");
+  const flat = flatParts(molecule, ring);
+  const flatAtoms = ring.flatMap((index, position) =>
+    isTrigonal(molecule, molecule.atoms[index]!) ? [position] : [],
+  );
+  const found = (kind: RingKind): FoundRing => ({
+    atoms: [...ring],
+    kind,
+    flatBonds: flat.bonds,
+    flatAtoms,
+    partners,
+  });
+
+  const bridged = partners.filter((partner) => partner.shared.length > 2);
+  if (bridged.some(({ shared, bridge }) => shared.length === 4 && bridge <= 4)) return found("boat");
+  for (const { shared, bridge } of bridged) {
+    if (shared.length > 4 || (shared.length === 3 && bridge < 2))
+      return refuse("unsupported-bridged-ring", "is bridged by a single atom across one corner");
+    if (shared.length === 4 && bridge <= LONGEST_DECIDING_BRIDGE)
+      return refuse(
+        "unsupported-bridged-ring",
+        `is spanned by a bridge of ${bridge} atoms between opposite corners`,
+      );
+  }
+  const flatName = flatRefusal(molecule, ring, flat);
+  if (flatName !== null) return refuse(...flatName);
+  if (flat.bonds.length === 0) return found("chair");
+  if (bridged.length > 0)
+    return refuse("unsupported-bridged-ring", "is both bridged and held flat at one bond");
+  return found("half-chair");
+}
+
+/** Why the flat parts of a ring leave it neither a chair nor a half-chair, or null. */
+function flatRefusal(
   molecule: Molecule,
   ring: readonly number[],
-  atoms: readonly Atom[],
-): RingRefusal | null {
-  const where = `The six-membered ring of atoms ${ring.join(", ")}`;
-  for (const atom of atoms) {
-    if (atom.aromatic) {
-      return {
-        code: "unsupported-unsaturated-ring",
-        message: `${where} shares an edge with an aromatic ring; not analysed yet.`,
-      };
-    }
-    for (const neighbour of atom.neighbours) {
-      const bond = bondBetween(molecule, atom.index, neighbour)!;
-      if (bond.order === 1) continue;
-      const inRing = ring.includes(neighbour);
-      if (!inRing && (atom.element === "S" || atom.element === "P" || atom.element === "Se")) continue;
-      return {
-        code: "unsupported-unsaturated-ring",
-        message: `${where} has a double bond ${inRing ? "at" : "on"} its atom ${atom.index}; such rings are not analysed yet.`,
-      };
-    }
+  flat: { readonly bonds: readonly number[]; readonly corners: readonly number[] },
+): readonly [RingRefusalCode, string] | null {
+  const { bonds, corners } = flat;
+  const at = (position: number) => molecule.atoms[ring[(position + 6) % 6]!]!;
+  const isAcyl = (position: number) =>
+    at(position).element === "C" &&
+    at(position).neighbours.some(
+      (n) =>
+        bondBetween(molecule, at(position).index, n)!.order === 2 &&
+        ["O", "S", "N", "Se"].includes(molecule.atoms[n]!.element),
+    );
+  if (bonds.length > 1) {
+    return ["unsupported-unsaturated-ring", "holds more than one flat bond (a diene or the like)"];
   }
-  const nitrogen = atoms.find((atom) => isPlanarNitrogen(molecule, atom, ring));
-  if (nitrogen === undefined) return null;
-  return {
-    code: "unsupported-planar-nitrogen",
-    message: `${where} has a planar nitrogen (atom ${nitrogen.index}: amide, carbamate, urea, sulfonamide, nitroso or the like); not analysed yet.`,
-  };
-}
-
-/** True when the ring nitrogen's lone pair is drawn into an acyl, sulfonyl, imine, nitrile or nitroso group. */
-function isPlanarNitrogen(molecule: Molecule, atom: Atom, ring: readonly number[]): boolean {
-  if (atom.element !== "N" || atom.charge !== 0) return false;
-  return atom.neighbours.some((neighbour) => {
-    if (ring.includes(neighbour)) return false;
-    const next = molecule.atoms[neighbour]!;
-    if (next.aromatic) return false;
-    if (!["C", "N", "S", "P"].includes(next.element)) return false;
-    return next.neighbours.some((far) => {
-      const order = bondBetween(molecule, neighbour, far)!.order;
-      const element = molecule.atoms[far]!.element;
-      return order > 1 && (element === "O" || element === "S" || element === "N" || element === "Se");
-    });
-  });
-}
-
-function sharing(molecule: Molecule, ring: readonly number[]): RingRefusal | null {
-  let worst: RingRefusal | null = null;
-  let most = 0;
-  for (const other of molecule.rings) {
-    if (other.length === ring.length && other.every((atom) => ring.includes(atom))) continue;
-    const common = other.filter((atom) => ring.includes(atom)).length;
-    if (common <= most) continue;
-    most = common;
-    const atoms = ring.join(", ");
-    worst =
-      common === 1
-        ? {
-            code: "unsupported-spiro-ring",
-            message: `The six-membered ring of atoms ${atoms} shares one atom with another ring (spiro); not analysed yet.`,
-          }
-        : common === 2
-          ? {
-              code: "unsupported-fused-ring",
-              message: `The six-membered ring of atoms ${atoms} is fused to another ring; not analysed yet.`,
-            }
-          : {
-              code: "unsupported-bridged-ring",
-              message: `The six-membered ring of atoms ${atoms} is part of a bridged system; not analysed yet.`,
-            };
+  for (const corner of corners.filter(isAcyl)) {
+    const beside = [corner - 1, corner + 1].map(at);
+    if (beside.some((atom) => atom.element === "N"))
+      return ["unsupported-lactam-ring", "is a lactam or imide ring"];
+    if (beside.some((atom) => ["O", "S", "Se"].includes(atom.element)))
+      return ["unsupported-lactone-ring", "is a lactone or carbonate ring"];
   }
-  return worst;
+  if (bonds.length === 1) {
+    return corners.length === 0
+      ? null
+      : ["unsupported-unsaturated-ring", "has a flat bond and a further flat atom (an enone or the like)"];
+  }
+  if (corners.length < 2) return null;
+  if (corners.length > 2) return ["unsupported-flat-corners", "has more than two flat corners"];
+  const apart = Math.min(corners[1]! - corners[0]!, 6 - (corners[1]! - corners[0]!));
+  if (apart === 1) return ["unsupported-flat-corners", "has two flat corners side by side"];
+  const bothNitrogen = corners.every((corner) => at(corner).element === "N");
+  if (apart === 3 && !bothNitrogen)
+    return ["unsupported-flat-corners", "has flat corners opposite each other, which favours twist-boats"];
+  return null;
 }

@@ -1,3 +1,4 @@
+import { isPlanarNitrogen } from "./flatAtoms.ts";
 import type { Atom, Molecule } from "./Molecule.ts";
 
 /**
@@ -21,6 +22,7 @@ export function ringKey(molecule: Molecule, parent: string, numbering: readonly 
 }
 
 function nitrogenVariant(molecule: Molecule, atom: Atom, groups: readonly number[]): string {
+  if (isPlanarNitrogen(molecule, atom)) return "NAcyl";
   if (atom.charge > 0) return groups.length === 0 ? "NH2+" : groups.length === 1 ? "NHR+" : "NR2+";
   const first = groups[0];
   if (first === undefined) return "NH";

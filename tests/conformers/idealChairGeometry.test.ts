@@ -11,8 +11,8 @@ async function chairs(smiles: string) {
   if (!read.ok) throw new Error(read.reason);
   const search = findRings(read.molecule);
   if (!search.ok) throw new Error(search.refusal.message);
-  const rings = analyseRings(read.molecule, search.rings, null, services);
-  return enumerateConformers(rings)!.map(([chair]) => ({
+  const rings = analyseRings(read.molecule, search.rings, { ring: null, atoms: new Map() }, services);
+  return enumerateConformers(read.molecule, rings)!.map(({ chairs: [chair] }) => ({
     chair: chair!,
     atoms: idealChairGeometry(read.molecule, chair!),
   }));

@@ -1,7 +1,9 @@
 import { describe, expect, test } from "vitest";
 import { enumerateConformers } from "../../src/conformers/enumerateConformers.ts";
-import { relateChairs } from "../../src/conformers/relateChairs.ts";
+import { relateConformers } from "../../src/conformers/relateConformers.ts";
 import { analyseRings } from "../../src/structure/analyseRings.ts";
+import { describeBody } from "../../src/structure/describeBody.ts";
+import { findOpenCentres } from "../../src/structure/findOpenCentres.ts";
 import { findRings } from "../../src/structure/findRings.ts";
 import { bareServices } from "./bareServices.ts";
 
@@ -11,10 +13,12 @@ async function relationOf(smiles: string): Promise<string> {
   if (!read.ok) throw new Error(read.reason);
   const search = findRings(read.molecule);
   if (!search.ok) throw new Error(search.refusal.message);
-  const rings = analyseRings(read.molecule, search.rings, null, services);
-  const sets = enumerateConformers(rings)!;
+  const [member] = findOpenCentres(read.molecule, services.toolkit).members;
+  const { molecule } = member!;
+  const rings = analyseRings(molecule, search.rings, { ring: null, atoms: new Map() }, services);
+  const sets = enumerateConformers(molecule, rings)!;
   expect(sets).toHaveLength(2);
-  return relateChairs(read.molecule, sets[0]![0]!, sets[1]![0]!);
+  return relateConformers(describeBody(molecule, rings, services.toolkit), sets[0]!, sets[1]!);
 }
 
 describe("The two chairs of a ring (common practice)", () => {
@@ -37,6 +41,15 @@ describe("The two chairs of a ring (common practice)", () => {
     ["cis-2,3-dimethyl-1,4-dioxane", "C[C@H]1OCCO[C@H]1C", "enantiomeric"],
     ["cis-3,5-dimethylpiperidine", "C[C@H]1CNC[C@@H](C)C1", "diastereomeric"],
     ["trans-3,5-dimethylpiperidine", "C[C@H]1CNC[C@H](C)C1", "identical"],
+    ["cis-decalin", "C1CC[C@H]2CCCC[C@H]2C1", "enantiomeric"],
+    [
+      "cis-decalin-4a,8a-diol, whose two conformers are mirror images",
+      "C1CC[C@]2(O)CCCC[C@]2(O)C1",
+      "enantiomeric",
+    ],
+    ["cyclohexene", "C1CCC=CC1", "enantiomeric"],
+    ["cyclohexanone", "O=C1CCCCC1", "identical"],
+    ["1,4-dioxaspiro[4.5]decane", "C1CCC2(CC1)OCCO2", "identical"],
     ["cis-1,2-dibromocyclohexane", "Br[C@H]1CCCC[C@H]1Br", "enantiomeric"],
   ])("of %s (%s) are %s", async (_name, smiles, relation) => {
     expect(await relationOf(smiles)).toBe(relation);

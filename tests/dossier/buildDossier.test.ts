@@ -101,11 +101,25 @@ describe("A dossier", () => {
     expect(listed.rings[0]!.configuration).toEqual([]);
   });
 
-  test("of a fused ring shows its identity and says that it is not yet analysed", async () => {
-    const dossier = await only('structure: "C1CC[C@@H]2CCCC[C@H]2C1"');
-    expect(dossier.identity.formula).toBe("C10H18");
+  test("of a ring that is refused shows its identity and says why it is not analysed", async () => {
+    const dossier = await only('structure: "O=C1CCCCO1"');
+    expect(dossier.identity.formula).toBe("C5H8O2");
     expect(dossier.conformers).toEqual([]);
-    expect(dossier.conclusion).toContain("not analysed yet");
+    expect(dossier.conclusion).toContain("lactone or carbonate ring");
+  });
+
+  test("of two fused rings names the fusion and says how its conformers are related (common practice)", async () => {
+    const trans = await only('structure: "C1CC[C@@H]2CCCC[C@H]2C1"');
+    expect(trans.conformers).toHaveLength(1);
+    expect(trans.systems[0]?.fusions).toMatchObject([{ locants: ["8a", "4a"], relation: "trans" }]);
+    const cis = await only('structure: "C1CC[C@H]2CCCC[C@H]2C1"');
+    expect(cis.conformers).toHaveLength(2);
+    expect(cis.systems[0]?.fusions).toMatchObject([{ relation: "cis" }]);
+    expect(cis.kinship).toEqual({
+      distinct: 2,
+      distinctUpToMirror: 1,
+      pairs: [{ first: "A", second: "B", relation: "enantiomeric" }],
+    });
   });
 });
 

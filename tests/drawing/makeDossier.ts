@@ -110,7 +110,10 @@ export function makeDossier(spec: DossierSpec): Dossier {
       locants: Array.from({ length: 6 }, (_, k) => `${k + 1}${"′".repeat(index)}`),
       parent: ringSpec.parent ?? "cyclohexane",
       ringKey: ringSpec.parent ?? "cyclohexane",
+      system: index,
+      kind: "chair",
       substituents,
+      branches: [],
       configuration: [],
     };
   });
@@ -128,8 +131,10 @@ export function makeDossier(spec: DossierSpec): Dossier {
           ringAtom: substituent.ringAtom,
           substituent: substituent.atom,
           locant: substituent.locant,
+          kind: "group" as const,
           group: substituent.label,
           orientation,
+          pseudo: false,
           face: substituent.face!,
         };
       }),
@@ -155,6 +160,8 @@ export function makeDossier(spec: DossierSpec): Dossier {
           ? [population, population]
           : [Math.max(0, population - 0.03), Math.min(1, population + 0.02)],
       contributions: [],
+      relaxed: null,
+      nitrogens: [],
       geometry: { atoms: rings.flatMap((ring, r) => ringGeometry(ring, signs[r]!, atoms)) },
     };
   });
@@ -182,6 +189,18 @@ export function makeDossier(spec: DossierSpec): Dossier {
     name: spec.name ?? "invented test compound",
     structure: { atoms, bonds },
     rings,
+    systems: rings.map((ring) => ({
+      index: ring.system,
+      rings: [ring.index],
+      atoms: ring.atoms,
+      bonds: ring.atoms.map((from, k) => ({
+        from,
+        to: ring.atoms[(k + 1) % 6]!,
+        order: 1 as const,
+        aromatic: false,
+      })),
+      fusions: [],
+    })),
     conformers,
     relation: spec.relation ?? (conformers.length === 2 ? "diastereomeric" : null),
     equilibria,
@@ -205,6 +224,7 @@ function ringGeometry(
         element,
         atom: index,
         parent: atom,
+        system: ring.system,
         x: centre.x + length * out * Math.cos(angle),
         y: centre.y + length * out * Math.sin(angle),
         z: centre.z + length * (axial ? up : -up / 3),
@@ -217,7 +237,7 @@ function ringGeometry(
     });
     const free = [false, true].filter((axial) => !groups.some((group) => group.axial === axial));
     return [
-      { element: atoms[atom]!.element, atom, parent: null, ...centre },
+      { element: atoms[atom]!.element, atom, parent: null, system: ring.system, ...centre },
       ...groups.map((group) => group.placed),
       ...free.slice(0, atoms[atom]!.hydrogens).map((axial) => hang("H", null, axial)),
     ];

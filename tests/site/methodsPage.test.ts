@@ -21,8 +21,13 @@ const HELD: readonly (readonly [file: string, code: string, words: string])[] = 
   ["energetics/standIn.ts", "REFERENCE_TEMPERATURE = 298.15;", "and stand-ins, are taken at 298.15 K"],
   [
     "energetics/heteroringStandIn.ts",
-    "{ sameClass: 0.3, otherState: 0.3, otherRing: 0.4, strongDipole: 1.0 }",
+    "{ sameClass: 0.3, otherState: 0.3, otherRing: 0.4, strongDipole: 1.0, allylic: 1.5 }",
     "the cyclohexane value, 0.4 added, or 1.0 for a polar group",
+  ],
+  [
+    "energetics/heteroringStandIn.ts",
+    "{ share: 0.6, u: 0.5 }",
+    "0.6 of the cyclohexane value stands in, 0.5 added",
   ],
   ["energetics/heteroringStandIn.ts", "0.15 * Math.abs(value)", "0.4 and 15 % of the value added"],
   ["energetics/rules/nitrogenSubstituent.ts", "LOAN = 0.5;", "nitrogen of the same ring, 0.5 added"],

@@ -26,7 +26,7 @@ const FILES = [
     `---\ncode: X-01\nname: ${JSON.stringify(HOSTILE)}\nstructure: "C[C@H]1CC[C@@H](O)CC1"\nevidence:\n  - observation: ${JSON.stringify(HOSTILE)}\n    source: ${JSON.stringify(HOSTILE)}\nclaim: { configuration: cis, statement: ${JSON.stringify(HOSTILE)} }\nreview: [ { by: ${JSON.stringify(HOSTILE)}, on: 2026-11-20, as: author } ]\n---\n${HOSTILE}\n\n[link](javascript:alert(3)) and $x^2$ and :value[population.major].\n\n::figure[chair]{conformer=B}\n`,
   ),
   file("series/one/x-02.md", '---\ncode: X-02\nname: plain\nstructure: "CN1CCC(C)CC1"\n---\n'),
-  file("series/one/x-03.md", '---\ncode: X-03\nname: fused\nstructure: "C1CCC2CCCCC2C1"\n---\n'),
+  file("series/one/x-03.md", '---\ncode: X-03\nname: lactone\nstructure: "O=C1CCCCO1"\n---\n'),
   file(
     "series/one/x-04.md",
     '---\ncode: X-04\nname: open\nstructure: "CC1CCC(O)CC1"\nstereoisomers: enumerate\n---\n',
@@ -176,7 +176,7 @@ describe("Pages", () => {
   });
 
   test("say plainly when nothing was analysed, and carry the caution everywhere", () => {
-    expect(made.get("series/one/x-03/index.html")).toContain("fused to another ring");
+    expect(made.get("series/one/x-03/index.html")).toContain("is a lactone or carbonate ring");
     for (const [name, text] of html()) expect(text, name).toContain("Draft for qualified review");
   });
 

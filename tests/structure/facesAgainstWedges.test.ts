@@ -62,7 +62,7 @@ describe("Faces of ring groups against an independent reading (source: RDKit, it
       const search = findRings(read.molecule);
       if (!search.ok) continue;
       rings++;
-      const ring = search.rings[0]!;
+      const ring = search.rings[0]!.atoms;
       const faces = ringFaces(read.molecule, ring);
       const { coordinates, wedges } = toolkit.depict(read.molecule);
       let area = 0;

@@ -1,4 +1,7 @@
+import type { AuthorNumbering } from "../../structure/analyseRings.ts";
+import type { Body } from "../../structure/Body.ts";
 import type { Member } from "../../structure/findOpenCentres.ts";
+import type { FoundRing } from "../../structure/findRings.ts";
 import type { Molecule } from "../../structure/Molecule.ts";
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type { Alert, Identity, Structure } from "../Dossier.ts";
@@ -18,8 +21,13 @@ export interface StructureResult {
   readonly written: Molecule;
   /** Place of each atom in the SMILES as written, hydrogens written as atoms counted. */
   readonly writtenAtoms: readonly number[];
-  /** Saturated six-membered rings that stand alone; empty when `refusal` says why. */
+  /** Six-membered rings whose states are known; empty when `refusal` says why. */
   readonly rings: readonly AnalysedRing[];
+  /** The same rings as found in the graph, and what the author fixed of their locants. */
+  readonly found: readonly FoundRing[];
+  readonly author: AuthorNumbering;
+  /** The part of `molecule` whose conformers are compared; null when there is none. */
+  readonly body: Body | null;
   readonly refusal: Refusal | null;
   /** The molecule whose conformers are listed; null when open stereochemistry forbids it. */
   readonly molecule: Molecule | null;

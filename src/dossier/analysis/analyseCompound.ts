@@ -1,6 +1,8 @@
+import { MAXIMUM_CONFORMERS } from "../../conformers/enumerateConformers.ts";
 import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import type { MediumClass } from "../../register/Register.ts";
 import { analyseRings } from "../../structure/analyseRings.ts";
+import { describeBody } from "../../structure/describeBody.ts";
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type {
   Alert,
@@ -9,14 +11,17 @@ import type {
   Conformer,
   Equilibrium,
   Identity,
+  Kinship,
   MemberSummary,
   Ring,
+  RingSystem,
   Structure,
   TemperatureRow,
 } from "../Dossier.ts";
 import { analyseConformers, type ConformerResult } from "./analyseConformers.ts";
 import { conformerAlerts } from "./conformerAlerts.ts";
 import { configurationOf, describeRing } from "./describeRing.ts";
+import { describeSystems } from "./describeSystems.ts";
 import { readStructure } from "./readStructure.ts";
 import type { Services } from "./Services.ts";
 import type { Refusal, StructureResult } from "./StructureResult.ts";
@@ -40,8 +45,10 @@ export interface Analysis {
   /** Place of each atom in the SMILES as written; not its index only where hydrogens are written as atoms. */
   readonly writtenAtoms: readonly number[];
   readonly rings: readonly Ring[];
+  readonly systems: readonly RingSystem[];
   readonly conformers: readonly Conformer[];
   readonly relation: ChairRelation | null;
+  readonly kinship: Kinship;
   readonly equilibria: readonly Equilibrium[];
   readonly temperatures: readonly TemperatureRow[];
   readonly members: readonly MemberSummary[];
@@ -87,20 +94,34 @@ export function analyseCompound(
 
   let refusal = structure.refusal;
   let result: ConformerResult | null = null;
-  if (refusal === null && structure.molecule !== null) {
-    result = analyseConformers(structure.molecule, structure.rings, context, request.temperature_K);
-    if (result === null) {
+  if (refusal === null && structure.molecule !== null && structure.body !== null) {
+    const { molecule, body } = structure;
+    const answer = analyseConformers(
+      { molecule, body, rings: structure.rings },
+      context,
+      request.temperature_K,
+    );
+    if (answer === "too many") {
       refusal = {
         code: "unsupported-too-many-conformers",
-        message: "The rings and inverting nitrogens give more than 128 conformers.",
+        message: `The rings and inverting nitrogens give more than ${MAXIMUM_CONFORMERS} conformers.`,
         position: null,
       };
+    } else if (answer === "none") {
+      alerts.push({
+        code: "no-chair",
+        severity: "stop",
+        message:
+          "No arrangement closes every six-membered ring as a chair (or as the half-chair or boat its bonds ask for): at least one ring must be a twist-boat. No chair conformers are listed.",
+      });
+    } else {
+      result = answer;
     }
   }
   if (refusal !== null) alerts.push({ code: refusal.code, severity: "stop", message: refusal.message });
   if (result !== null) alerts.push(...conformerAlerts(result, structure.rings, context));
 
-  const undecided = result === null && refusal === null;
+  const undecided = structure.molecule === null && refusal === null;
   const members =
     undecided && request.enumerateStereoisomers ? membersOf(structure, context, request, services) : [];
   const order = ["stop", "caution", "note"];
@@ -112,8 +133,10 @@ export function analyseCompound(
       structure: structure.structure,
       writtenAtoms: structure.writtenAtoms,
       rings,
+      systems: describeSystems(structure.molecule ?? structure.written, structure.rings, open),
       conformers: result?.conformers ?? [],
       relation: result?.relation ?? null,
+      kinship: result?.kinship ?? { distinct: 0, distinctUpToMirror: 0, pairs: [] },
       equilibria: result?.equilibria ?? [],
       temperatures: result?.temperatures ?? [],
       members,
@@ -149,16 +172,25 @@ function membersOf(
   services: Services,
 ): readonly MemberSummary[] {
   return structure.members.flatMap((member) => {
-    const atoms = structure.rings.map((ring) => ring.atoms);
     const numbering = structure.rings[0];
     const locants =
       numbering === undefined
         ? null
         : [1, 2, 3, 4, 5, 6].map((n) => numbering.atoms[numbering.locants.indexOf(n)]!);
-    const rings = analyseRings(member.molecule, atoms, locants, services);
-    const result = analyseConformers(member.molecule, rings, context, request.temperature_K);
-    const major = result?.conformers[0];
-    if (major === undefined) return [];
+    const rings = analyseRings(
+      member.molecule,
+      structure.found,
+      { ...structure.author, ring: locants },
+      services,
+    );
+    const body = describeBody(member.molecule, rings, services.toolkit);
+    const result = analyseConformers(
+      { molecule: member.molecule, body, rings },
+      context,
+      request.temperature_K,
+    );
+    if (typeof result === "string") return [];
+    const major = result.conformers[0]!;
     const configuration = rings.flatMap((ring) =>
       configurationOf(ring).map(({ locants: pair, relation }) => `${relation}-${pair.join(",")}`),
     );
@@ -182,12 +214,17 @@ function describeCentres(
   labels: ReadonlyMap<number, string>,
   rings: readonly AnalysedRing[],
 ): readonly string[] {
-  const inRings = rings.flatMap((ring) =>
-    [1, 2, 3, 4, 5, 6].flatMap((locant) => {
-      const label = labels.get(ring.atoms[ring.locants.indexOf(locant)]!);
-      return label === undefined ? [] : [`${locant}${"′".repeat(ring.index)}${label}`];
-    }),
-  );
+  const inRings = [
+    ...new Set(
+      rings.flatMap((ring) =>
+        [1, 2, 3, 4, 5, 6].flatMap((locant) => {
+          const position = ring.locants.indexOf(locant);
+          const label = labels.get(ring.atoms[position]!);
+          return label === undefined ? [] : [`${ring.names[position]}${label}`];
+        }),
+      ),
+    ),
+  ];
   const ringAtoms = new Set(rings.flatMap((ring) => ring.atoms));
   const others = [...labels].filter(([atom]) => !ringAtoms.has(atom)).sort(([a], [b]) => a - b);
   return [...inRings, ...others.map(([atom, label]) => `atom ${atom} ${label}`)];

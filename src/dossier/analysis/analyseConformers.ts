@@ -1,7 +1,11 @@
-import { type Chair, orientationOf } from "../../conformers/Chair.ts";
-import { type ChairSet, enumerateConformers } from "../../conformers/enumerateConformers.ts";
-import { idealChairGeometry } from "../../conformers/idealChairGeometry.ts";
-import { relateChairs } from "../../conformers/relateChairs.ts";
+import { type Chair, hasOrientations, isPseudo, orientationOf } from "../../conformers/Chair.ts";
+import {
+  type Arrangement,
+  type ChairSet,
+  enumerateConformers,
+} from "../../conformers/enumerateConformers.ts";
+import { idealGeometry } from "../../conformers/idealGeometry.ts";
+import { relateConformers } from "../../conformers/relateConformers.ts";
 import { conformerTerms } from "../../energetics/conformerTerms.ts";
 import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import type { EnergyTerm } from "../../energetics/EnergyTerm.ts";
@@ -9,27 +13,32 @@ import { equilibriumConstant } from "../../energetics/equilibriumConstant.ts";
 import { combine, type LinearEnergy, linearEnergy } from "../../energetics/LinearEnergy.ts";
 import { populations } from "../../energetics/populations.ts";
 import { standIn } from "../../energetics/standIn.ts";
-import { labelText } from "../../quantity/labelText.ts";
 import { kelvin, kilojoulePerMole, NORMAL_95 } from "../../quantity/units.ts";
+import type { Body } from "../../structure/Body.ts";
 import type { Molecule } from "../../structure/Molecule.ts";
-import type { AnalysedRing, Substituent } from "../../structure/StructureAnalysis.ts";
+import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type {
   ChairRelation,
   Conformer,
   Contribution,
   Equilibrium,
+  Kinship,
   Position,
   TemperatureRow,
 } from "../Dossier.ts";
+import { conformerLabels } from "./conformerLabels.ts";
 
 /** Doubt between conformers that differ and yet are charged alike, kcal/mol. */
 const RESIDUAL = 0.2;
+/** Doubt of each conformer of a system of several rings, whose strain single values do not show, kcal/mol. */
+const RING_SYSTEM = { fused: 0.4, bridged: 1.0 };
 /** Temperatures of the dossier's table, K; its own is added. */
 const TEMPERATURE_GRID = [173.15, 198.15, 223.15, 248.15, 273.15, 298.15, 323.15, 348.15, 373.15];
 
 export interface ConformerResult {
   readonly conformers: readonly Conformer[];
   readonly relation: ChairRelation | null;
+  readonly kinship: Kinship;
   readonly equilibria: readonly Equilibrium[];
   readonly temperatures: readonly TemperatureRow[];
   /** Parameters that differ between conformers and so decide the result: id and basis. */
@@ -42,7 +51,15 @@ export interface ConformerResult {
   readonly chairSets: readonly ChairSet[];
 }
 
+/** A molecule with all senses that matter, the rings to analyse in it, and the part that is compared. */
+export interface ConformerInput {
+  readonly molecule: Molecule;
+  readonly body: Body;
+  readonly rings: readonly AnalysedRing[];
+}
+
 interface Candidate {
+  readonly arrangement: Arrangement;
   readonly chairs: ChairSet;
   readonly label: string;
   readonly terms: readonly EnergyTerm[];
@@ -52,21 +69,23 @@ interface Candidate {
 /**
  * Every all-chair conformer with its energy, population and geometry, most stable first.
  * @param temperature - in K, above zero.
- * @returns null when there are too many conformers to list.
+ * @returns `too many` when they cannot be listed, `none` when no arrangement of chairs closes every ring.
  */
 export function analyseConformers(
-  molecule: Molecule,
-  rings: readonly AnalysedRing[],
+  { molecule, body, rings }: ConformerInput,
   context: EnergyContext,
   temperature: number,
-): ConformerResult | null {
-  const sets = enumerateConformers(rings);
-  if (sets === null) return null;
+): ConformerResult | "too many" | "none" {
+  const arrangements = enumerateConformers(molecule, rings);
+  if (arrangements === null) return "too many";
+  if (arrangements.length === 0) return "none";
+  const labels = conformerLabels(arrangements.map(({ chairs }) => chairs));
   const candidates = distinguish(
-    molecule,
-    sets.map((chairs) => {
+    body,
+    arrangements.map((arrangement, i) => {
+      const { chairs } = arrangement;
       const terms = conformerTerms(chairs, context);
-      return { chairs, label: labelOf(chairs), terms, energy: linearEnergy(terms) };
+      return { arrangement, chairs, label: labels[i]!, terms, energy: linearEnergy(terms) };
     }),
   );
   const T = kelvin(temperature);
@@ -93,25 +112,28 @@ export function analyseConformers(
     return {
       id: conformerId(i),
       label: candidate.label,
-      rings: candidate.chairs.map((chair) => ({ ring: chair.ring.index, form: "chair" })),
-      positions: candidate.chairs.flatMap(positionsOf),
+      rings: candidate.chairs.map((chair) => ({ ring: chair.ring.index, form: chair.form })),
+      positions: candidate.chairs.filter(hasOrientations).flatMap(positionsOf),
       deltaG_kJ_mol: clean(value),
       u_kJ_mol: clean(u),
       sum_kJ_mol: clean(combine([{ energy: candidate.energy, weight: 1 }], T).value),
       population: shares[i]!.population,
       population95: shares[i]!.population95,
       contributions: candidate.terms.map((term) => contributionOf(term, temperature)),
-      geometry: { atoms: candidate.chairs.flatMap((chair) => idealChairGeometry(molecule, chair)) },
+      geometry: { atoms: idealGeometry(candidate.arrangement) },
+      relaxed: null,
+      nitrogens: [],
     };
   });
   const grid = [...new Set([...TEMPERATURE_GRID, temperature])].sort((a, b) => a - b);
   return {
     conformers,
     chairSets: ordered.map((candidate) => candidate.chairs),
-    relation: relationOf(molecule, ordered),
+    relation: relationOf(body, ordered),
+    kinship: kinshipOf(body, ordered),
     equilibria: ordered.slice(1).map((candidate, i) => {
       const { value, u } = relativeTo(lowest.energy, candidate.energy);
-      const bySymmetry = equalBySymmetry(molecule, lowest.chairs, candidate.chairs);
+      const bySymmetry = equalBySymmetry(body, lowest, candidate);
       const low = value - NORMAL_95 * u;
       const high = value + NORMAL_95 * u;
       const K = (deltaG: number) => equilibriumConstant(kilojoulePerMole(deltaG), T);
@@ -149,32 +171,18 @@ function clean(value: number): number {
   return Math.round(value * 1e9) / 1e9 + 0;
 }
 
-/** Locants with a or e; the group in brackets where two share a ring atom, and always on a ring of several. */
-function labelOf(chairs: ChairSet): string {
-  const parts = chairs.flatMap((chair) => {
-    const { ring } = chair;
-    const count = (group: Substituent) =>
-      ring.substituents.filter((s) => s.ringAtom === group.ringAtom).length;
-    const entries = ring.substituents.map((group) => {
-      const locant = ring.locants[ring.atoms.indexOf(group.ringAtom)]!;
-      const letter = orientationOf(chair, group) === "axial" ? "a" : "e";
-      const name = count(group) > 1 ? `(${labelText(group.label)})` : "";
-      return { locant, text: `${locant}${"′".repeat(ring.index)}${letter}${name}` };
-    });
-    return entries.sort((a, b) => a.locant - b.locant || (a.text < b.text ? -1 : 1)).map(({ text }) => text);
-  });
-  return parts.length === 0 ? "unsubstituted" : parts.join(",");
-}
-
 function positionsOf(chair: Chair): readonly Position[] {
   const { ring } = chair;
-  return ring.substituents.map((group) => ({
+  const branches = new Set(ring.branches);
+  return [...ring.substituents, ...ring.branches].map((group) => ({
     ring: ring.index,
     ringAtom: group.ringAtom,
     substituent: group.atom,
-    locant: `${ring.locants[ring.atoms.indexOf(group.ringAtom)]}${"′".repeat(ring.index)}`,
+    locant: ring.names[ring.atoms.indexOf(group.ringAtom)]!,
+    kind: branches.has(group) ? ("ring bond" as const) : ("group" as const),
     group: group.label,
     orientation: orientationOf(chair, group),
+    pseudo: isPseudo(chair, group.ringAtom),
     face: chair.faces.get(group.atom)!,
   }));
 }
@@ -212,51 +220,97 @@ function contributionOf(term: EnergyTerm, temperature: number): Contribution {
   };
 }
 
-/**
- * True when each ring of one conformer can be laid on that of the other, for two rings also crosswise, or for a single
- * ring on its mirror image. More than two rings are compared in their own places only: whether an exchange of several
- * rings is a symmetry of the whole molecule cannot be seen from the rings one by one.
- */
-function equalBySymmetry(molecule: Molecule, a: ChairSet, b: ChairSet): boolean {
-  const relation = (i: number, j: number) => relateChairs(molecule, a[i]!, b[j]!);
-  if (a.every((_, i) => relation(i, i) === "identical")) return true;
-  if (a.length === 1) return relation(0, 0) === "enantiomeric";
-  return a.length === 2 && relation(0, 1) === "identical" && relation(1, 0) === "identical";
+/** Superimposable and mirror-image conformers have equal energies, and no others have by symmetry. */
+function equalBySymmetry(body: Body, a: Candidate, b: Candidate): boolean {
+  return relateConformers(body, a.arrangement, b.arrangement) !== "diastereomeric";
+}
+
+/** Pairs that are superimposable or mirror images, and how many conformers are left without them. */
+function kinshipOf(body: Body, ordered: readonly Candidate[]): Kinship {
+  const pairs: Kinship["pairs"][number][] = [];
+  // Each conformer is compared with the first of every class so far; the rest of a class follows from that.
+  const classes: { readonly members: { readonly index: number; readonly mirrored: boolean }[] }[] = [];
+  ordered.forEach((candidate, index) => {
+    for (const { members } of classes) {
+      const first = ordered[members[0]!.index]!;
+      const relation = relateConformers(body, first.arrangement, candidate.arrangement);
+      if (relation === "diastereomeric") continue;
+      const mirrored = relation === "enantiomeric";
+      for (const member of members) {
+        pairs.push({
+          first: conformerId(member.index),
+          second: conformerId(index),
+          relation: member.mirrored === mirrored ? "identical" : "enantiomeric",
+        });
+      }
+      members.push({ index, mirrored });
+      return;
+    }
+    classes.push({ members: [{ index, mirrored: false }] });
+  });
+  return {
+    distinct: classes.reduce(
+      (sum, { members }) => sum + (members.some(({ mirrored }) => mirrored) ? 2 : 1),
+      0,
+    ),
+    distinctUpToMirror: classes.length,
+    pairs,
+  };
 }
 
 /**
  * Conformers that are charged exactly alike without being equal by symmetry get a doubt of their own, so that
  * the equality of a model is never printed as an equality of nature.
  */
-function distinguish(molecule: Molecule, candidates: readonly Candidate[]): readonly Candidate[] {
+function distinguish(body: Body, candidates: readonly Candidate[]): readonly Candidate[] {
+  const rings = candidates[0]!.chairs.map(({ ring }) => ring);
+  const severalRings = rings.some((ring) => ring.branches.length > 0);
+  const bridged = rings.some((ring) => ring.partners.some(({ shared }) => shared.length > 2));
+  const strain = bridged ? RING_SYSTEM.bridged : RING_SYSTEM.fused;
   const done: Candidate[] = [];
+  const kinds: Candidate[] = [];
   for (const candidate of candidates) {
-    const twin = done.find(
-      (other) =>
-        sameCharge(other.energy, candidate.energy) &&
-        !equalBySymmetry(molecule, other.chairs, candidate.chairs),
-    );
-    if (twin === undefined) {
-      done.push(candidate);
+    const alike = done.filter((other) => sameCharge(other.energy, candidate.energy));
+    const twin = alike.find((other) => !equalBySymmetry(body, other, candidate));
+    if (severalRings) {
+      let kind = kinds.findIndex((other) => equalBySymmetry(body, other, candidate));
+      if (kind < 0) kind = kinds.push(candidate) - 1;
+      done.push(
+        withDoubt(
+          candidate,
+          `allowance/ring-system/${kind}`,
+          strain,
+          "strain of the ring system",
+          `What the rings of the system do to each other beyond single contacts is not charged; ${strain} kcal/mol of doubt for each conformer of its own.`,
+        ),
+      );
       continue;
     }
-    const count = done.length;
-    const parameter = standIn(
-      `allowance/alike/${count}`,
-      0,
-      RESIDUAL,
-      `Nothing in the model tells this conformer from ${twin.label}, though they are not equal by symmetry; ${RESIDUAL} kcal/mol of doubt.`,
+    done.push(
+      twin === undefined
+        ? candidate
+        : withDoubt(
+            candidate,
+            `allowance/alike/${done.length}`,
+            RESIDUAL,
+            "not told apart by the model",
+            `Nothing in the model tells this conformer from ${twin.label}, though they are not equal by symmetry; ${RESIDUAL} kcal/mol of doubt.`,
+          ),
     );
-    const term: EnergyTerm = {
-      kind: "additivity allowance",
-      label: "not told apart by the model",
-      atoms: [],
-      parts: [{ parameter, coefficient: 1 }],
-    };
-    const terms = [...candidate.terms, term];
-    done.push({ ...candidate, terms, energy: linearEnergy(terms) });
   }
   return done;
+}
+
+function withDoubt(candidate: Candidate, id: string, u: number, label: string, why: string): Candidate {
+  const parameter = standIn(id, 0, u, why);
+  const term: EnergyTerm = {
+    kind: "additivity allowance",
+    label,
+    atoms: [],
+    parts: [{ parameter, coefficient: 1 }],
+  };
+  const terms = [...candidate.terms, term];
+  return { ...candidate, terms, energy: linearEnergy(terms) };
 }
 
 function sameCharge(a: LinearEnergy, b: LinearEnergy): boolean {
@@ -268,12 +322,12 @@ function sameCharge(a: LinearEnergy, b: LinearEnergy): boolean {
  * Relation of the two chairs of a single ring: the better conformer of each chair, or, where only the group on an
  * inverting atom tells conformers apart, the two places of that group.
  */
-function relationOf(molecule: Molecule, ordered: readonly Candidate[]): ChairRelation | null {
+function relationOf(body: Body, ordered: readonly Candidate[]): ChairRelation | null {
   const first = ordered[0]!;
   if (first.chairs.length !== 1) return null;
   const own = first.chairs[0]!;
   const other = ordered.find((candidate) => candidate.chairs[0]!.sign !== own.sign) ?? ordered[1];
-  return other === undefined ? null : relateChairs(molecule, own, other.chairs[0]!);
+  return other === undefined ? null : relateConformers(body, first.arrangement, other.arrangement);
 }
 
 /** Parameters whose factor is not the same in all conformers. */

@@ -1,4 +1,4 @@
-import { orientationOf } from "../../conformers/Chair.ts";
+import { hasOrientations, orientationOf } from "../../conformers/Chair.ts";
 import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import { classOf } from "../../energetics/siteGroup.ts";
 import { labelText } from "../../quantity/labelText.ts";
@@ -66,12 +66,25 @@ export function conformerAlerts(
     );
   }
   const best = result.chairSets[0]!;
-  const axialBulky = best.flatMap((chair) =>
-    chair.ring.substituents.filter(
-      (group) => group.groupClass === "tertiary-alkyl" && orientationOf(chair, group) === "axial",
+  const axialBulky = best
+    .filter(hasOrientations)
+    .flatMap((chair) =>
+      chair.ring.substituents.filter(
+        (group) =>
+          group.groupClass === "tertiary-alkyl" &&
+          orientationOf(chair, group) === "axial" &&
+          chair.ring.partners.every(({ atoms }) => !atoms.includes(group.ringAtom)),
+      ),
+    );
+  // What several rings share is held in place by all of them, and no strain that another form would lose.
+  const shared = new Set(
+    rings.flatMap((ring) =>
+      ring.partners.flatMap(({ atoms }) => ring.atoms.filter((atom) => atoms.includes(atom))),
     ),
   );
-  const strain = result.conformers[0]!.sum_kJ_mol;
+  const strain = result.conformers[0]!.contributions.filter(
+    ({ atoms }) => atoms.length > 0 && atoms.every((atom) => !shared.has(atom)),
+  ).reduce((sum, { value_kJ_mol }) => sum + value_kJ_mol, 0);
   if (axialBulky.length > 0 || strain > STRAIN_LIMIT) {
     const reason =
       axialBulky.length > 0
@@ -111,7 +124,7 @@ export function conformerAlerts(
 /** Donor within reach of a polar group in some conformer: gauche on neighbouring ring atoms, or syn-axial. */
 function donorPairs(chairSets: ConformerResult["chairSets"], context: EnergyContext): readonly string[] {
   const found = new Set<string>();
-  for (const chair of chairSets.flat()) {
+  for (const chair of chairSets.flat().filter(hasOrientations)) {
     const { ring } = chair;
     const polar = ring.substituents.filter((group) => classOf(context.register, group).polar);
     const at = (group: Substituent) => ring.atoms.indexOf(group.ringAtom);

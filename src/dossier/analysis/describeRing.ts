@@ -6,26 +6,38 @@ import type { Ring } from "../Dossier.ts";
  * @param open - atoms whose configuration is not decided: their groups have no face and no cis/trans relation.
  */
 export function describeRing(ring: AnalysedRing, open: ReadonlySet<number> = new Set()): Ring {
-  const locant = (atom: number) => `${ring.locants[ring.atoms.indexOf(atom)]}${"′".repeat(ring.index)}`;
+  const locant = (atom: number) => ring.names[ring.atoms.indexOf(atom)]!;
   return {
     index: ring.index,
+    kind: ring.kind,
+    system: ring.system,
     atoms: ring.atoms,
-    locants: ring.atoms.map(locant),
+    locants: ring.names,
     parent: ring.parent,
     ringKey: ring.ringKey,
-    substituents: ring.substituents.map((group) => {
+    substituents: [...ring.substituents, ...ring.flatGroups].map((group) => {
       const site = ring.sites.find((entry) => entry.ringAtom === group.ringAtom)!;
       return {
         ringAtom: group.ringAtom,
         atom: group.atom,
         locant: locant(group.ringAtom),
         face:
-          site.faces === "free" || open.has(group.ringAtom) ? null : site.up === group.atom ? "up" : "down",
+          site.faces === "free" || site.faces === "flat" || open.has(group.ringAtom)
+            ? null
+            : site.up === group.atom
+              ? "up"
+              : "down",
         group: group.group?.key ?? null,
         label: group.label,
         labelReversed: group.labelReversed,
       };
     }),
+    branches: ring.branches.map((branch) => ({
+      ringAtom: branch.ringAtom,
+      atom: branch.atom,
+      locant: locant(branch.ringAtom),
+      towards: branch.label.replace(/^ring [A-Z][a-z]?/, ""),
+    })),
     configuration: configurationOf(ring, open),
   };
 }
@@ -39,12 +51,12 @@ export function configurationOf(
     (group) =>
       !ring.inverting.includes(group.ringAtom) &&
       !open.has(group.ringAtom) &&
-      ring.substituents.filter((other) => other.ringAtom === group.ringAtom).length === 1,
+      [...ring.substituents, ...ring.branches].filter((other) => other.ringAtom === group.ringAtom).length ===
+        1,
   );
   const face = (group: (typeof single)[number]) =>
     ring.sites.find((site) => site.ringAtom === group.ringAtom)!.up === group.atom;
-  const locant = (group: (typeof single)[number]) =>
-    `${ring.locants[ring.atoms.indexOf(group.ringAtom)]}${"′".repeat(ring.index)}`;
+  const locant = (group: (typeof single)[number]) => ring.names[ring.atoms.indexOf(group.ringAtom)]!;
   return single.flatMap((a, i) =>
     single.slice(i + 1).map((b) => ({
       locants: [locant(a), locant(b)] as const,

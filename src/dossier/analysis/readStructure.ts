@@ -1,9 +1,11 @@
-import { analyseRings } from "../../structure/analyseRings.ts";
+import { type AuthorNumbering, analyseRings } from "../../structure/analyseRings.ts";
 import { chiralityOf } from "../../structure/chiralityOf.ts";
+import { describeBody } from "../../structure/describeBody.ts";
 import { findOpenCentres, type OpenStereo } from "../../structure/findOpenCentres.ts";
 import { findOpenDoubleBonds } from "../../structure/findOpenDoubleBonds.ts";
-import { findRings } from "../../structure/findRings.ts";
+import { type FoundRing, findRings } from "../../structure/findRings.ts";
 import { type Molecule, mirrorImage, withSenses } from "../../structure/Molecule.ts";
+import { readAtomClasses } from "../../structure/readAtomClasses.ts";
 import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type { Alert, Identity, Stereocentre, Structure } from "../Dossier.ts";
 import type { Services } from "./Services.ts";
@@ -27,7 +29,16 @@ export function readStructure(
   const search = findRings(written);
   const chosen = search.ok ? chooseMember(written, open, search.rings, services) : null;
   const shown = chosen ?? open.members[0]!.molecule;
-  const rings = search.ok ? analyseRings(shown, search.rings, authorNumbering, services) : [];
+  const classes = readAtomClasses(smiles);
+  const author: AuthorNumbering = {
+    ring: authorNumbering,
+    atoms: new Map(
+      read.writtenAtoms.flatMap((place, atom): [number, string][] =>
+        classes.has(place) ? [[atom, `${classes.get(place)!}`]] : [],
+      ),
+    ),
+  };
+  const rings = search.ok ? analyseRings(shown, search.rings, author, services) : [];
   const alerts = stereoAlerts(open, chosen !== null || !search.ok);
   if (search.ok) {
     for (const { message } of search.unanalysed)
@@ -50,13 +61,16 @@ export function readStructure(
           position: null,
         }
     : { ...search.refusal, position: null };
-  const identity = describeIdentity(smiles, written, shown, open, openBonds, rings, read, services);
+  const identity = describeIdentity(smiles, written, shown, open, openBonds, rings, author, read, services);
   const result: StructureResult = {
     identity,
     structure: drawStructure(written, services),
     written,
     writtenAtoms: read.writtenAtoms,
     rings,
+    found: search.ok ? search.rings : [],
+    author,
+    body: refusal === null && chosen !== null ? describeBody(chosen, rings, toolkit) : null,
     refusal,
     molecule: refusal === null ? chosen : null,
     members: open.members,
@@ -72,14 +86,16 @@ export function readStructure(
 function chooseMember(
   written: Molecule,
   open: OpenStereo,
-  rings: readonly (readonly number[])[],
+  rings: readonly FoundRing[],
   services: Services,
 ): Molecule | null {
   if (!open.complete) return null;
   const [first, second, ...more] = open.members;
   if (second === undefined) return first!.molecule;
   if (more.length === 0 && first!.mirrorSmiles === second.canonicalSmiles) return first!.molecule;
-  const inRing = new Set(rings.flat());
+  const inRing = new Set(
+    rings.flatMap((ring) => [ring.atoms, ...ring.partners.map(({ atoms }) => atoms)]).flat(),
+  );
   const outside = new Map(
     written.atoms.filter((atom) => !inRing.has(atom.index)).map((atom) => [atom.index, null]),
   );
@@ -121,6 +137,7 @@ function describeIdentity(
   open: OpenStereo,
   openBonds: readonly (readonly [number, number])[],
   rings: readonly AnalysedRing[],
+  author: AuthorNumbering,
   read: { readonly formula: string; readonly molarMass: number },
   services: Services,
 ): Identity {
@@ -129,9 +146,9 @@ function describeIdentity(
   const locantOf = (atom: number): string | null => {
     for (const ring of rings) {
       const position = ring.atoms.indexOf(atom);
-      if (position >= 0) return `${ring.locants[position]}${"′".repeat(ring.index)}`;
+      if (position >= 0) return ring.names[position]!;
     }
-    return null;
+    return author.atoms.get(atom) ?? null;
   };
   const given: Stereocentre[] = [...labels.atoms].flatMap(([atom, label]) =>
     label === "R" || label === "S" || label === "r" || label === "s"
@@ -159,7 +176,7 @@ function describeIdentity(
         descriptor: "unspecified" as const,
       })),
     ].sort((a, b) => a.atoms[0] - b.atoms[0] || a.atoms[1] - b.atoms[1]),
-    chirality: chiralityOf(shown, toolkit),
+    chirality: chiralityOf(shown, toolkit, new Set([...labels.atoms.keys(), ...open.centres])),
   };
 }
 

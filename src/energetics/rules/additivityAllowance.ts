@@ -1,7 +1,7 @@
 import { orientationOf } from "../../conformers/Chair.ts";
 import { classOf, nameOf } from "../siteGroup.ts";
 import { standIn } from "../standIn.ts";
-import { pairsAtDistance, place } from "./describe.ts";
+import { inOneRing, pairsAtDistance, place } from "./describe.ts";
 import type { EnergyRule } from "./EnergyRule.ts";
 
 /** Standard uncertainty, kcal/mol: diaxial polar groups across the ring, and diequatorial ones 1,3 to each other. */
@@ -22,6 +22,7 @@ export const additivityAllowance: EnergyRule = {
     const both = (distance: 2 | 3, orientation: "axial" | "equatorial") =>
       pairsAtDistance(chair, distance).filter(
         ([a, b]) =>
+          !inOneRing(chair, a, b) &&
           polar(a) &&
           polar(b) &&
           orientationOf(chair, a) === orientation &&

@@ -1,6 +1,6 @@
 import { orientationOf } from "../../conformers/Chair.ts";
 import { axialParameter } from "../axialParameter.ts";
-import { groupAt } from "./describe.ts";
+import { groupAt, outsideBonds } from "./describe.ts";
 import type { EnergyRule } from "./EnergyRule.ts";
 
 /** Each axial group costs its own G(axial) − G(equatorial) at its place in the ring. */
@@ -10,7 +10,7 @@ export const axialGroup: EnergyRule = {
   appliesTo:
     "every axial group on an atom that keeps its configuration: gauche to the ring on both sides, the two 1,3-diaxial contacts with hydrogen",
   terms: (chair, context) =>
-    chair.ring.substituents
+    outsideBonds(chair)
       .filter(
         (group) => !chair.ring.inverting.includes(group.ringAtom) && orientationOf(chair, group) === "axial",
       )

@@ -3,7 +3,7 @@ import { nitrogenRow } from "../../register/nitrogenRow.ts";
 import { rowParameter } from "../rowParameter.ts";
 import { nameOf, similarGroups } from "../siteGroup.ts";
 import { borrowed, standIn } from "../standIn.ts";
-import { groupAt } from "./describe.ts";
+import { groupAt, outsideBonds } from "./describe.ts";
 import type { EnergyRule } from "./EnergyRule.ts";
 
 /** Loan from another group of the same class, kcal/mol. */
@@ -15,7 +15,7 @@ export const nitrogenSubstituent: EnergyRule = {
   title: "Groups on inverting nitrogen",
   appliesTo: "the axial group on a ring nitrogen that inverts; both places are separate conformers",
   terms: (chair, context) =>
-    chair.ring.substituents
+    outsideBonds(chair)
       .filter(
         (group) => chair.ring.inverting.includes(group.ringAtom) && orientationOf(chair, group) === "axial",
       )

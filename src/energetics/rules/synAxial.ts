@@ -3,7 +3,7 @@ import { cyclohexaneParameter } from "../cyclohexaneParameter.ts";
 import { pairParameter } from "../pairParameter.ts";
 import { classOf, nameOf } from "../siteGroup.ts";
 import { standIn } from "../standIn.ts";
-import { pairsAtDistance, place } from "./describe.ts";
+import { inOneRing, pairsAtDistance, place } from "./describe.ts";
 import type { EnergyRule } from "./EnergyRule.ts";
 
 /** Two groups axial on the same side, two ring atoms apart. */
@@ -14,6 +14,7 @@ export const synAxial: EnergyRule = {
     "two axial groups 1,3 to each other: the excess over the two contacts with hydrogen that their own values already hold",
   terms: (chair, context) =>
     pairsAtDistance(chair, 2)
+      .filter(([a, b]) => a.atom !== b.atom && !inOneRing(chair, a, b))
       .filter(([a, b]) => orientationOf(chair, a) === "axial" && orientationOf(chair, b) === "axial")
       .map(([a, b]) => {
         const found = pairParameter(context, "syn-axial", chair.ring, [a, b]);

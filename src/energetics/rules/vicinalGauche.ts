@@ -2,7 +2,7 @@ import { orientationOf } from "../../conformers/Chair.ts";
 import { pairParameter } from "../pairParameter.ts";
 import { classOf, nameOf } from "../siteGroup.ts";
 import { standIn } from "../standIn.ts";
-import { pairsAtDistance, place } from "./describe.ts";
+import { chargedElsewhere, pairsAtDistance, place } from "./describe.ts";
 import type { EnergyRule } from "./EnergyRule.ts";
 
 /** Two groups on neighbouring ring atoms are gauche unless both are axial, when they are anti. */
@@ -13,6 +13,7 @@ export const vicinalGauche: EnergyRule = {
     "two groups on neighbouring ring atoms, equatorial–equatorial or axial–equatorial; nothing for the anti, diaxial pair",
   terms: (chair, context) =>
     pairsAtDistance(chair, 1)
+      .filter(([a, b]) => !chargedElsewhere(chair, a, b))
       .filter(([a, b]) => !(orientationOf(chair, a) === "axial" && orientationOf(chair, b) === "axial"))
       .map(([a, b]) => {
         const found = pairParameter(context, "vicinal gauche", chair.ring, [a, b]);

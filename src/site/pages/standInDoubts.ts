@@ -13,7 +13,7 @@ export const STAND_IN_DOUBTS: readonly (readonly [missing: string, standsIn: str
   ],
   [
     "Axial group in a heteroring",
-    "A group of the same class at the same place, 0.3 added; else the group in another state of the ring’s heteroatom, 0.3 added, though a polar group is never carried between charged and uncharged rings; else, for carbon groups without polar bonds, the cyclohexane value times the ratio known for methyl at this place, 0.4 and 15\u00a0% of the value added; else the cyclohexane value, 0.4 added, or 1.0 for a polar group beside a heteroatom or on a charged ring.",
+    "A group of the same class at the same place, 0.3 added; else the group in another state of the ring’s heteroatom, 0.3 added, though a polar group is never carried between charged and uncharged rings; else, for carbon groups without polar bonds, the cyclohexane value times the ratio known for methyl at this place, 0.4 and 15\u00a0% of the value added; else the cyclohexane value, 0.4 added, or 1.0 for a polar group beside a heteroatom or on a charged ring, or 1.5 beside a trigonal ring atom. A carbon group beside an N-acyl nitrogen takes the value known for N-acylpiperidine. In a half-chair 0.6 of the cyclohexane value stands in, 0.5 added.",
   ],
   [
     "Group on an inverting nitrogen",

@@ -1,0 +1,92 @@
+import { type Chair, hasOrientations, isPseudo, orientationOf } from "../../conformers/Chair.ts";
+import type { ChairSet } from "../../conformers/enumerateConformers.ts";
+import { labelText } from "../../quantity/labelText.ts";
+import type { Substituent } from "../../structure/StructureAnalysis.ts";
+
+/**
+ * A label for each conformer: locants with a or e, `ψ` before the letter next to a flat bond. The group stands in brackets
+ * where two share a ring atom; a group that two rings share has a letter for each, `4a-a/e`. Bonds between
+ * rings are named where groups alone do not tell the conformers apart, and where there are no groups.
+ */
+export function conformerLabels(sets: readonly ChairSet[]): readonly string[] {
+  const short = sets.map((chairs) => groupEntries(chairs).join(","));
+  const unclear = new Set(short).size < short.length || short.some((label) => label === "");
+  return sets.map((chairs, i) => {
+    const parts = unclear
+      ? [short[i]!, branchEntries(chairs).join(","), formEntries(chairs)]
+      : [short[i]!, formEntries(chairs)];
+    const label = parts.filter((part) => part !== "").join("; ");
+    return label === "" ? "unsubstituted" : label;
+  });
+}
+
+interface Entry {
+  readonly locant: string;
+  readonly group: string;
+  readonly letters: string[];
+}
+
+function groupEntries(chairs: ChairSet): readonly string[] {
+  const entries = new Map<number, Entry>();
+  for (const chair of chairs.filter(hasOrientations)) {
+    const { ring } = chair;
+    for (const group of ring.substituents) {
+      const several = ring.substituents.filter((s) => s.ringAtom === group.ringAtom).length > 1;
+      const entry = entries.get(group.atom) ?? {
+        locant: ring.names[ring.atoms.indexOf(group.ringAtom)]!,
+        group: several ? `(${labelText(group.label)})` : "",
+        letters: [],
+      };
+      entry.letters.push(letterOf(chair, group));
+      entries.set(group.atom, entry);
+    }
+  }
+  return [...entries.values()]
+    .sort(
+      (a, b) =>
+        compareLocants(a.locant, b.locant) || (a.letters[0]! + a.group < b.letters[0]! + b.group ? -1 : 1),
+    )
+    .map(({ locant, group, letters }) => {
+      const short = [...new Set(letters)].length === 1 ? letters[0]! : letters.join("/");
+      const joint = /[a-z]$/.test(locant) || short.length > 2 ? "-" : "";
+      return `${locant}${joint}${short}${group}`;
+    });
+}
+
+/** Bonds between rings, each seen from the ring that comes first. */
+function branchEntries(chairs: ChairSet): readonly string[] {
+  return chairs.filter(hasOrientations).flatMap((chair, index) => {
+    const earlier = new Set(chairs.slice(0, index).flatMap(({ ring }) => ring.atoms));
+    return chair.ring.branches
+      .filter((branch) => !earlier.has(branch.atom))
+      .map((branch) => {
+        const from = chair.ring.names[chair.ring.atoms.indexOf(branch.ringAtom)]!;
+        return `${from}–${branch.label.replace(/^ring [A-Z][a-z]?/, "")} ${letterOf(chair, branch)}`;
+      });
+  });
+}
+
+/** Forms other than chairs and half-chairs, which have no letters. */
+function formEntries(chairs: ChairSet): string {
+  return chairs
+    .filter((chair) => !hasOrientations(chair))
+    .map(({ ring, form }) => (chairs.length > 1 ? `ring ${ring.index + 1} ${form}` : form))
+    .join(", ");
+}
+
+function letterOf(chair: Chair, group: Substituent): string {
+  const letter = orientationOf(chair, group) === "axial" ? "a" : "e";
+  return isPseudo(chair, group.ringAtom) ? `ψ${letter}` : letter;
+}
+
+/** By number, then by letter, primes last: 1, 2, 4a, 5, 1′. */
+function compareLocants(a: string, b: string): number {
+  const key = (locant: string) => [
+    (locant.match(/′/g) ?? []).length,
+    Number.parseInt(locant, 10),
+    (/[a-z]/.exec(locant)?.[0] ?? "").charCodeAt(0) || 0,
+  ];
+  const [x, y] = [key(a), key(b)];
+  const at = x.findIndex((value, i) => value !== y[i]);
+  return at < 0 ? 0 : x[at]! - y[at]!;
+}
