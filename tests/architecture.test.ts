@@ -32,6 +32,7 @@ const OWNED: readonly (readonly [RegExp, string])[] = [
   [/^(@svgdotjs\/|svgdom)/, "drawing"],
   [/^katex/, "derivation"],
   [/^@rdkit\/rdkit/, "structure"],
+  [/^openchemlib/, "conformers"],
   [/^@11ty\//, "site"],
 ];
 /** What a pure core must not reach for, with the reason. */

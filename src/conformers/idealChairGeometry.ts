@@ -1,5 +1,6 @@
 import type { Molecule } from "../structure/Molecule.ts";
 import { axialFace, type Chair } from "./Chair.ts";
+import { bondLength } from "./geometry/covalentRadii.ts";
 
 /**
  * Cyclohexane as measured by electron diffraction (C–C 1.536 Å, C–C–C 111.4°, from memory) has its atoms on a
@@ -15,30 +16,6 @@ const HEIGHT = 0.2305;
 const RING_BOND = Math.hypot(RADIUS, 2 * HEIGHT);
 const EQUATORIAL_OUT = RADIUS / RING_BOND;
 const EQUATORIAL_DOWN = (2 * HEIGHT) / RING_BOND;
-
-/** Covalent radii in Å for single bonds (rounded from Cordero et al., Dalton Trans. 2008, 2832; from memory). */
-const RADII: Readonly<Record<string, number>> = {
-  H: 0.31,
-  D: 0.31,
-  C: 0.76,
-  N: 0.71,
-  O: 0.66,
-  F: 0.57,
-  Si: 1.11,
-  P: 1.07,
-  S: 1.05,
-  Cl: 1.02,
-  Ge: 1.2,
-  As: 1.19,
-  Se: 1.2,
-  Br: 1.2,
-  Sn: 1.39,
-  Te: 1.38,
-  I: 1.39,
-  Hg: 1.32,
-  Pb: 1.46,
-  Mg: 1.41,
-};
 
 export interface PlacedAtom {
   readonly element: string;
@@ -66,7 +43,7 @@ export function idealChairGeometry(molecule: Molecule, chair: Chair): readonly P
     const centre = { x: RADIUS * out[0], y: RADIUS * out[1], z: up * HEIGHT };
     const ringAtom: PlacedAtom = { element: atom.element, atom: index, parent: null, ...rounded(centre) };
     const place = (element: string, exocyclic: number | null, axial: boolean): PlacedAtom => {
-      const length = (RADII[atom.element] ?? 1) + (RADII[element] ?? 1);
+      const length = bondLength(atom.element, element, 1, false);
       const outward = axial ? 0 : EQUATORIAL_OUT;
       const upward = axial ? up : -up * EQUATORIAL_DOWN;
       const point = {
