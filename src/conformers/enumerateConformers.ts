@@ -84,7 +84,17 @@ function solveSystem(
   const inverting = [...new Set(rings.flatMap((ring) => ring.inverting))].sort((a, b) => a - b);
   if (2 ** inverting.length > MAXIMUM_CONFORMERS) return null;
   const solutions: Solution[] = [];
-  for (let code = 0; code < 2 ** inverting.length; code++) {
+  // Where nothing but nitrogens shared by rings has faces, turning all of them over gives the same forms once more.
+  const mirrored = rings.every((ring) =>
+    ring.sites.every(
+      (site) =>
+        (site.up === null && site.down === null) ||
+        site.faces === "flat" ||
+        (site.faces === "free" && isShared(molecule, site.ringAtom)),
+    ),
+  );
+  const codes = 2 ** (mirrored && inverting.length > 0 ? inverting.length - 1 : inverting.length);
+  for (let code = 0; code < codes; code++) {
     const senses = new Map<number, TetrahedralSense>(
       inverting.map((atom, bit) => [atom, (code >> bit) & 1 ? "cw" : "ccw"]),
     );
@@ -105,6 +115,10 @@ function solveSystem(
     place([], 0);
   }
   return solutions.length > MAXIMUM_CONFORMERS ? null : solutions;
+}
+
+function isShared(molecule: Molecule, atom: number): boolean {
+  return molecule.rings.filter((ring) => ring.includes(atom)).length > 1;
 }
 
 function statesOf(rings: readonly AnalysedRing[], ring: AnalysedRing, twist: boolean): readonly RingState[] {
