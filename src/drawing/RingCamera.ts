@@ -1,12 +1,15 @@
 /**
- * How a ring is looked at, the same for all conformers of a dossier.
+ * How a ring system is looked at, the same for all conformers of a dossier.
  *
- * One ring atom stands at the right end. From the position exactly sideways, in which axial bonds would hide each
+ * One ring leads: its axis stands upright and one of its atoms at the right end. From the position exactly sideways,
+ * in which axial bonds would hide each
  * other, the camera steps aside by a small angle: to one side when that atom points up and to the other when it
  * points down. The two chairs of a flip are then each other's mirror shape, as the trade draws them, and every
  * ring atom stays at its end of the drawing. Degrees.
  */
 export interface RingCamera {
+  /** Index of the leading ring among the dossier's rings. */
+  readonly lead: number;
   /** Index, in the ring's list, of the atom at the right end. */
   readonly rightEnd: number;
   readonly azimuth: number;

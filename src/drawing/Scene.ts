@@ -21,6 +21,7 @@ export type Part =
   | "ring bond"
   | "axial bond"
   | "equatorial bond"
+  | "group bond"
   | "hydrogen bond"
   | "bond"
   | "wedge"

@@ -1,41 +1,100 @@
+import type { RingBond } from "./ChairView.ts";
+import { frontBond } from "./frontBond.ts";
 import type { LaidChair } from "./layChair.ts";
-import { BACK_STROKE, BOND_STROKE, FRONT_STROKE } from "./measures.ts";
+import { BACK_STROKE, BOND_STROKE, DOUBLE_GAP, FRONT_STROKE } from "./measures.ts";
+import type { ProjectedPoint } from "./projectPoint.ts";
+import type { Point } from "./Scene.ts";
 import type { Stroke } from "./Stroke.ts";
 
 /**
- * The bonds of a chair as strokes of full length. The front edge is heavy, its neighbours taper from it, the
- * back is light; the bonds to groups are as light as the back and take the accent of their orientation.
+ * The bonds of a chair as strokes of full length. The front edge of each ring is heavy, its neighbours taper from it,
+ * the back is light; the bonds to groups are as light as the back and take the accent of their orientation.
+ * A double bond is two strokes: in a ring the second lies inside, beside the first.
  */
 export function chairStrokes({ view, branches }: LaidChair): readonly Stroke[] {
-  const { vertices, front } = view;
-  const count = vertices.length;
-  const ring = vertices.map((vertex, index): Stroke => {
-    const next = (index + 1) % count;
-    const isFront = index === front;
-    return {
-      from: vertex.at,
-      to: vertices[next]!.at,
-      width: isFront || index === (front + 1) % count ? FRONT_STROKE : BACK_STROKE,
-      endWidth: isFront || next === front ? FRONT_STROKE : BACK_STROKE,
+  const { vertices } = view;
+  const widthAt = endWidths(view);
+  const ring = view.bonds.flatMap((bond): Stroke[] => {
+    const [a, b] = [vertices[bond.from]!, vertices[bond.to]!];
+    const single: Stroke = {
+      from: a.at,
+      to: b.at,
+      width: widthAt(bond, bond.from),
+      endWidth: widthAt(bond, bond.to),
       ink: "ink",
       part: "ring bond",
-      atoms: [vertex.atom, vertices[next]!.atom],
-      vertices: [index, next],
+      atoms: [a.atom, b.atom],
+      vertices: [bond.from, bond.to],
     };
+    if (!bond.double) return [single];
+    const inside = { x: (a.centre.x + b.centre.x) / 2, y: (a.centre.y + b.centre.y) / 2 };
+    const middle = { x: (a.at.x + b.at.x) / 2, y: (a.at.y + b.at.y) / 2 };
+    const across = normal(a.at, b.at);
+    const side = across.x * (inside.x - middle.x) + across.y * (inside.y - middle.y) < 0 ? -1 : 1;
+    const second = shifted(a.at, b.at, side * DOUBLE_GAP, 0.12);
+    return [single, { ...single, ...second, width: BACK_STROKE, endWidth: BACK_STROKE }];
   });
-  const bonds = view.branches.map((branch, index): Stroke => {
+  const bonds = view.branches.flatMap((branch, index): Stroke[] => {
     const vertex = vertices[branch.vertex]!;
     const isHydrogen = branch.atom === null;
-    return {
+    const to = { ...branches[index]!.bond!.to, depth: branch.end.depth };
+    const single: Stroke = {
       from: vertex.at,
-      to: { ...branches[index]!.bond!.to, depth: branch.end.depth },
+      to,
       width: BOND_STROKE,
       endWidth: BOND_STROKE,
-      ink: isHydrogen ? "ink" : branch.orientation,
-      part: isHydrogen ? "hydrogen bond" : `${branch.orientation} bond`,
+      ink: isHydrogen ? "ink" : (branch.orientation ?? "ink"),
+      part: isHydrogen
+        ? "hydrogen bond"
+        : branch.orientation === null
+          ? "group bond"
+          : `${branch.orientation} bond`,
       atoms: isHydrogen ? [vertex.atom] : [vertex.atom, branch.atom!],
       vertices: [branch.vertex],
     };
+    if (!branch.double) return [single];
+    return [1, -1].map((side) => ({ ...single, ...shifted(vertex.at, to, (side * DOUBLE_GAP) / 2, 0) }));
   });
   return [...ring, ...bonds];
+}
+
+/** Width of a ring bond at one of its ends: heavy where it belongs to the front edge of a ring or meets it. */
+function endWidths(view: LaidChair["view"]): (bond: RingBond, end: number) => number {
+  const heavy = new Set<string>();
+  for (const ring of view.rings) {
+    const front = frontBond(view.vertices, ring);
+    const at = (step: number) => ring[(front + step + ring.length) % ring.length]!;
+    const [before, first, second, after] = [at(-1), at(0), at(1), at(2)];
+    for (const [from, to, end] of [
+      [first, second, first],
+      [first, second, second],
+      [before, first, first],
+      [second, after, second],
+    ]) {
+      heavy.add(`${from}-${to}@${end}`);
+      heavy.add(`${to}-${from}@${end}`);
+    }
+  }
+  return (bond, end) => (heavy.has(`${bond.from}-${bond.to}@${end}`) ? FRONT_STROKE : BACK_STROKE);
+}
+
+function normal(from: Point, to: Point): Point {
+  const length = Math.hypot(to.x - from.x, to.y - from.y) || 1;
+  return { x: -(to.y - from.y) / length, y: (to.x - from.x) / length };
+}
+
+/** The same line a little to one side, cut short at both ends by a share of its length. */
+function shifted(
+  from: ProjectedPoint,
+  to: ProjectedPoint,
+  by: number,
+  cut: number,
+): { readonly from: ProjectedPoint; readonly to: ProjectedPoint } {
+  const across = normal(from, to);
+  const along = (share: number): ProjectedPoint => ({
+    x: from.x + share * (to.x - from.x) + by * across.x,
+    y: from.y + share * (to.y - from.y) + by * across.y,
+    depth: from.depth + share * (to.depth - from.depth),
+  });
+  return { from: along(cut), to: along(1 - cut) };
 }

@@ -1,7 +1,11 @@
 import type { Dossier, Ring } from "../dossier/Dossier.ts";
+import type { ChairView } from "./ChairView.ts";
 import { layChair } from "./layChair.ts";
+import { BOND } from "./measures.ts";
+import { pointSegmentGap } from "./pointSegmentGap.ts";
 import type { RingCamera } from "./RingCamera.ts";
-import { viewChair } from "./viewChair.ts";
+import type { Point } from "./Scene.ts";
+import { viewRings } from "./viewRings.ts";
 
 /** Degrees above the mean plane that give the drawing chemists expect. */
 export const ELEVATION = 14;
@@ -11,29 +15,73 @@ const AZIMUTH_COST = 0.8;
 /** More conformers than this do not change the choice. */
 const JUDGED = 8;
 
+/** A system is judged by fewer conformers, since there is more to lay out in each. */
+const JUDGED_OF_SYSTEM = 2;
+/** Price of two ring bonds that cross or lie on each other in the drawing. */
+const COINCIDENT = 6;
+/** Drawn length, as a share of a bond, below which a ring bond is seen too nearly end on, and the price of that. */
+const SHORTEST = 0.45;
+const END_ON = 25;
+
 /**
- * Chooses one camera for each ring, shared by all conformers: of the six ring atoms that can stand at the right
- * end and a few azimuths, the choice with the fewest crowded labels and coincident bonds over all of them together.
+ * Chooses one camera for each ring system, shared by all conformers: of the rings that can lead, the six ring atoms that
+ * can stand at the right end and a few azimuths, the choice with the fewest crowded labels and coincident bonds over
+ * all of them together.
  */
 export function chooseCameras(dossier: Dossier, hydrogens: boolean): readonly RingCamera[] {
-  const judged = dossier.conformers.slice(0, JUDGED);
-  return dossier.rings.map((ring) => {
+  return dossier.systems.map((system) => {
+    const several = system.atoms.length > 6;
+    const judged = dossier.conformers.slice(0, several ? JUDGED_OF_SYSTEM : JUDGED);
     let best: { readonly camera: RingCamera; readonly cost: number } | null = null;
-    for (const azimuth of AZIMUTHS) {
-      for (let rightEnd = 0; rightEnd < 6; rightEnd++) {
-        const camera: RingCamera = { rightEnd, azimuth, elevation: ELEVATION };
-        const laid = judged.map((conformer) =>
-          layChair(viewChair(dossier, conformer, ring, camera, hydrogens)),
-        );
-        const cost =
-          laid.reduce((sum, each) => sum + each.cost, 0) / laid.length +
-          AZIMUTH_COST * (azimuth - AZIMUTHS[0]!) +
-          customCost(dossier, ring, rightEnd);
-        if (best === null || cost < best.cost - 1e-6) best = { camera, cost };
+    for (const lead of system.rings) {
+      const ring = dossier.rings.find((each) => each.index === lead)!;
+      for (const azimuth of AZIMUTHS) {
+        for (let rightEnd = 0; rightEnd < 6; rightEnd++) {
+          const camera: RingCamera = { lead, rightEnd, azimuth, elevation: ELEVATION };
+          const laid = judged.map((conformer) =>
+            layChair(viewRings(dossier, conformer, system, camera, hydrogens)),
+          );
+          const cost =
+            laid.reduce((sum, each) => sum + each.cost + (several ? overlaps(each.view) : 0), 0) /
+              laid.length +
+            AZIMUTH_COST * (azimuth - AZIMUTHS[0]!) +
+            customCost(dossier, ring, rightEnd);
+          if (best === null || cost < best.cost - 1e-6) best = { camera, cost };
+        }
       }
     }
     return best!.camera;
   });
+}
+
+/** What a drawing of several rings suffers from bonds that cross, lie on each other, or are seen end on. */
+function overlaps(view: ChairView): number {
+  const ends = view.bonds.map(({ from, to }) => [view.vertices[from]!.at, view.vertices[to]!.at] as const);
+  let cost = 0;
+  view.bonds.forEach((bond, i) => {
+    const [a, b] = ends[i]!;
+    const length = Math.hypot(b.x - a.x, b.y - a.y);
+    cost += END_ON * Math.max(0, SHORTEST - length / BOND);
+    for (let j = i + 1; j < ends.length; j++) {
+      const other = view.bonds[j]!;
+      if ([bond.from, bond.to].some((vertex) => vertex === other.from || vertex === other.to)) continue;
+      const [c, d] = ends[j]!;
+      if (segmentsMeet(a, b, c, d)) cost += COINCIDENT;
+      const close = [
+        pointSegmentGap(a, c, d),
+        pointSegmentGap(b, c, d),
+        pointSegmentGap(c, a, b),
+        pointSegmentGap(d, a, b),
+      ];
+      if (Math.min(...close) < 0.12 * BOND) cost += COINCIDENT / 2;
+    }
+  });
+  return cost;
+}
+
+function segmentsMeet(a: Point, b: Point, c: Point, d: Point): boolean {
+  const side = (p: Point, q: Point, r: Point) => (q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x);
+  return side(a, b, c) * side(a, b, d) < 0 && side(c, d, a) * side(c, d, b) < 0;
 }
 
 /**

@@ -9,6 +9,10 @@ interface Segment {
   readonly to: Point;
 }
 
+interface RingSegment extends Segment {
+  readonly vertices: readonly number[];
+}
+
 /** Free space wanted around letters, px, and the price of having less or none. */
 const WANTED = 4;
 const CROWDED = 8;
@@ -23,12 +27,12 @@ const PASSES = 8;
  * Each label starts with its own cheapest choice and then is chosen again in turn while the others stay, until
  * nothing changes: the result depends on nothing but the input.
  *
- * @param ring - the ring bonds, which cannot move; vertex k is where segments k − 1 and k meet.
+ * @param ring - the ring bonds, which cannot move, with the vertices at their ends.
  * @returns index of the choice of each slot and the total cost, which also judges the camera.
  */
 export function chooseLabels(
   slots: readonly LabelSlot[],
-  ring: readonly Segment[],
+  ring: readonly RingSegment[],
 ): { readonly chosen: readonly number[]; readonly cost: number } {
   const alone = slots.map((slot) => slot.choices.map((choice) => choice.cost + ringCost(slot, choice, ring)));
   const chosen = alone.map(cheapest);
@@ -68,11 +72,11 @@ function cheapest(costs: readonly number[]): number {
   return best;
 }
 
-function ringCost(slot: LabelSlot, choice: LabelChoice, ring: readonly Segment[]): number {
+function ringCost(slot: LabelSlot, choice: LabelChoice, ring: readonly RingSegment[]): number {
   let cost = 0;
-  for (const [index, segment] of ring.entries()) {
+  for (const segment of ring) {
     for (const box of choice.boxes) cost += price(segmentBoxGap(segment.from, segment.to, box));
-    const meets = index === slot.vertex || (index + 1) % ring.length === slot.vertex;
+    const meets = segment.vertices.includes(slot.vertex);
     if (choice.bond !== null && !meets) cost += sideBySide(choice.bond, segment);
   }
   return cost;

@@ -10,7 +10,7 @@ import { moveItems } from "./moveItems.ts";
 import { placeText } from "./placeText.ts";
 import type { RingCamera } from "./RingCamera.ts";
 import type { Box, Part, SceneItem, SceneText, TextRun } from "./Scene.ts";
-import { viewChair } from "./viewChair.ts";
+import { viewRings } from "./viewRings.ts";
 import { wrapLabel } from "./wrapLabel.ts";
 
 /** A conformer ready to be set into a figure: chairs centred on the origin, words to be set beneath. */
@@ -30,16 +30,22 @@ export interface BlockOptions {
 /** Between the chairs of two rings of one conformer. */
 const RING_GAP = 20;
 
-/** Draws the chair of every ring of a conformer, side by side where there is room, with its label and population. */
+/** Draws every ring system of a conformer, side by side where there is room, with its label and population. */
 export function conformerBlock(
   dossier: Dossier,
   conformer: Conformer,
   cameras: readonly RingCamera[],
   options: BlockOptions,
 ): ConformerBlock {
-  const chairs = dossier.rings.map((ring, index): RingDrawing => {
-    const view = viewChair(dossier, conformer, ring, cameras[index]!, options.hydrogens);
-    return { items: chairItems(layChair(view), options), number: index + 1, group: view.group };
+  const chairs = dossier.systems.map((system, index): RingDrawing => {
+    const view = viewRings(dossier, conformer, system, cameras[index]!, options.hydrogens);
+    const first = Math.min(...system.rings) + 1;
+    const last = Math.max(...system.rings) + 1;
+    return {
+      items: chairItems(layChair(view), options),
+      caption: first === last ? `ring ${first}` : `rings ${first}–${last}`,
+      group: view.group,
+    };
   });
   const items = sideBySide(chairs);
   const words = wordsOf(dossier, conformer);
@@ -48,7 +54,7 @@ export function conformerBlock(
 
 interface RingDrawing {
   readonly items: readonly SceneItem[];
-  readonly number: number;
+  readonly caption: string;
   readonly group: string;
 }
 
@@ -80,8 +86,8 @@ function sideBySide(chairs: readonly RingDrawing[]): readonly SceneItem[] {
   });
 }
 
-function ringCaption(chair: { number: number; group: string; centre: number }, below: number): SceneText {
-  return placeText(labelRuns(`ring ${chair.number}`, { size: SMALL_SIZE, ink: "muted" }), {
+function ringCaption(chair: { caption: string; group: string; centre: number }, below: number): SceneText {
+  return placeText(labelRuns(chair.caption, { size: SMALL_SIZE, ink: "muted" }), {
     at: { x: chair.centre, y: below + 6 + CAP_HEIGHT * SMALL_SIZE },
     anchor: "middle",
     part: "ring caption",
@@ -94,7 +100,7 @@ function wordsOf(dossier: Dossier, conformer: Conformer): readonly SceneText[] {
   const name: TextRun[] = [
     ...labelRuns(`${conformer.id}\u2002`, { size: TEXT_SIZE, ink: "ink", bold: true }),
   ];
-  const lines = wrapLabel(conformer.label, TEXT_SIZE, Math.max(150, 150 * dossier.rings.length));
+  const lines = wrapLabel(conformer.label, TEXT_SIZE, Math.max(150, 150 * dossier.systems.length));
   const rows: { readonly runs: readonly TextRun[]; readonly part: Part }[] = [
     { runs: join(name, conformerLabelRuns(lines[0] ?? "", TEXT_SIZE)), part: "conformer label" },
     ...lines

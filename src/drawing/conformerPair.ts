@@ -69,7 +69,10 @@ function drawArrows(
 
 function arrowWords(dossier: Dossier, equilibrium: Equilibrium): string {
   if (equilibrium.bySymmetry) {
-    return dossier.relation === "enantiomeric" ? "mirror-image chairs" : "identical chairs";
+    const relation = dossier.kinship.pairs.find(
+      ({ first, second }) => first === equilibrium.from && second === equilibrium.to,
+    )?.relation;
+    return (relation ?? dossier.relation) === "enantiomeric" ? "mirror-image chairs" : "identical chairs";
   }
   return equilibrium.unresolved ? "major conformer unresolved" : "";
 }

@@ -8,10 +8,14 @@ export function describeConformer(dossier: Dossier, conformer: Conformer): strin
     const places = conformer.positions
       .filter((position) => position.ring === ring.index)
       .sort((a, b) => Number.parseInt(a.locant, 10) - Number.parseInt(b.locant, 10))
-      .map((position) => `${labelText(position.group)} ${position.orientation} at ${position.locant}`);
+      .map(
+        (position) =>
+          `${labelText(position.group)} ${position.pseudo ? "pseudo" : ""}${position.orientation} at ${position.locant}`,
+      );
     const groups = places.length === 0 ? "no groups" : listed(places);
+    const form = conformer.rings.find((each) => each.ring === ring.index)?.form ?? "chair";
     const name =
-      dossier.rings.length > 1 ? `ring ${index + 1}, ${ring.parent}, chair` : `${ring.parent} chair`;
+      dossier.rings.length > 1 ? `ring ${index + 1}, ${ring.parent}, ${form}` : `${ring.parent} ${form}`;
     return `${name}: ${groups}`;
   });
   return `Conformer ${conformer.id}: ${rings.join("; ")}. Population ${formatPopulation(conformer.population, conformer.population95)}.`;

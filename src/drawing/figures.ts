@@ -20,7 +20,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
     title: "Conformers and their equilibrium",
     caption: captionOfEquilibrium,
     describe: (dossier) => describeConformers(dossier),
-    canShow: (dossier) => dossier.conformers.length > 0,
+    canShow: drawable,
     scene: equilibriumScene,
   },
   chair: {
@@ -31,7 +31,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
     },
     describe: (dossier, options = {}) => describeConformer(dossier, chosenConformer(dossier, options)),
     canShow: (dossier, options = {}) =>
-      dossier.conformers.length > 0 &&
+      drawable(dossier) &&
       (options.conformer === undefined || dossier.conformers.some(({ id }) => id === options.conformer)),
     scene: (dossier, options = {}) => chairScene(dossier, chosenConformer(dossier, options).id, options),
   },
@@ -59,6 +59,18 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
     scene: temperatureScene,
   },
 };
+
+/** Every conformer has coordinates for all ring atoms; a system that could not be built in space has none. */
+function drawable(dossier: Dossier): boolean {
+  return (
+    dossier.conformers.length > 0 &&
+    dossier.conformers.every(({ geometry }) =>
+      dossier.systems.every(({ atoms }) =>
+        atoms.every((atom) => geometry.atoms.some((each) => each.atom === atom)),
+      ),
+    )
+  );
+}
 
 const CUES = "The nearer ring edge is heavier; the letters a and e mark axial and equatorial bonds.";
 

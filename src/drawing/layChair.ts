@@ -28,9 +28,10 @@ export function layChair(view: ChairView): LaidChair {
       vertex.letters === null ? [] : [{ vertex: index, branch: null, choices: vertexChoices(vertex, group) }],
     ),
   ];
-  const ring = vertices.map(({ at }, index) => ({
-    from: at,
-    to: vertices[(index + 1) % vertices.length]!.at,
+  const ring = view.bonds.map(({ from, to }) => ({
+    from: vertices[from]!.at,
+    to: vertices[to]!.at,
+    vertices: [from, to],
   }));
   const { chosen, cost } = chooseLabels(slots, ring);
   const choices = slots.map((slot, index) => slot.choices[chosen[index]!]!);

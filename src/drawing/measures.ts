@@ -14,6 +14,8 @@ export const SCALE = BOND / 1.536;
 export const BACK_STROKE = 0.035 * BOND;
 export const FRONT_STROKE = 0.075 * BOND;
 export const BOND_STROKE = 0.038 * BOND;
+/** Between the two lines of a double bond. */
+export const DOUBLE_GAP = 0.1 * BOND;
 export const HAIRLINE = 0.75;
 
 /** Free space on either side of a nearer bond where it crosses a farther one. */

@@ -16,14 +16,11 @@ const X_HEIGHT = 0.49;
 export function orientationCues({ view, branches }: LaidChair, ground: Ground): readonly SceneText[] {
   const cues: SceneText[] = [];
   for (const [index, branch] of view.branches.entries()) {
-    if (branch.atom === null) continue;
+    if (branch.atom === null || branch.cue === "") continue;
     const { from, to } = branches[index]!.bond!;
     const length = Math.hypot(to.x - from.x, to.y - from.y);
     const across = { x: -(to.y - from.y) / length, y: (to.x - from.x) / length };
-    const runs = labelRuns(branch.orientation === "axial" ? "a" : "e", {
-      size: SMALL_SIZE,
-      ink: branch.orientation,
-    });
+    const runs = labelRuns(branch.cue, { size: SMALL_SIZE, ink: branch.orientation ?? "muted" });
     const places = ALONG.flatMap((along, order) =>
       BESIDE.flatMap((beside) =>
         [1, -1].map((side) => {

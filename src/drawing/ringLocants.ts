@@ -18,7 +18,7 @@ export function ringLocants({ view, letters }: LaidChair, ground: Ground): reado
   const placed: SceneText[] = [];
   for (const [index, vertex] of view.vertices.entries()) {
     const extra = letters.has(index) ? LETTER_REACH : 0;
-    const outward = Math.atan2(vertex.at.y, vertex.at.x);
+    const outward = Math.atan2(vertex.at.y - vertex.centre.y, vertex.at.x - vertex.centre.x);
     const runs = labelRuns(vertex.locant, { size: SMALL_SIZE, ink: "muted" });
     const places = Array.from({ length: DIRECTIONS }, (_, step) => {
       // Directions alternate to both sides of the outward one, so that equal places go to the same side everywhere.

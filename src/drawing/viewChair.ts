@@ -1,6 +1,6 @@
 import type { Conformer, Dossier, Orientation, Ring } from "../dossier/Dossier.ts";
-import { type AtomLetters, atomLetters } from "./atomLetters.ts";
 import type { Branch, ChairView, Vertex } from "./ChairView.ts";
+import { cornerLetters } from "./cornerLetters.ts";
 import { drawnEnd } from "./drawnEnd.ts";
 import { type Camera, projectPoint } from "./projectPoint.ts";
 import type { RingCamera } from "./RingCamera.ts";
@@ -48,7 +48,8 @@ export function viewChair(
       atom,
       locant: ring.locants[index] ?? "",
       at: see(ringAtoms[index]!),
-      letters: lettersOf(dossier, atom),
+      centre: { x: 0, y: 0 },
+      letters: cornerLetters(dossier, atom),
     }),
   );
   const groups = ring.substituents.map((substituent): Branch => {
@@ -68,6 +69,8 @@ export function viewChair(
       vertex,
       atom: substituent.atom,
       orientation: position.orientation,
+      cue: position.orientation === "axial" ? "a" : "e",
+      double: false,
       end: seeEnd(found, vertex, position.orientation),
       label: substituent.label,
       labelReversed: substituent.labelReversed,
@@ -86,6 +89,8 @@ export function viewChair(
         vertex,
         atom: null,
         orientation,
+        cue: "",
+        double: false,
         end: seeEnd(atom, vertex, orientation),
         label: "H",
         labelReversed: "H",
@@ -95,21 +100,8 @@ export function viewChair(
   return {
     group: `${conformer.id}/${ring.index}`,
     vertices,
+    bonds: vertices.map((_, from) => ({ from, to: (from + 1) % vertices.length, double: false })),
+    rings: [vertices.map((_, index) => index)],
     branches: [...groups, ...drawn],
-    front: frontBond(vertices),
   };
-}
-
-function lettersOf(dossier: Dossier, index: number): AtomLetters | null {
-  const atom = dossier.structure.atoms[index]!;
-  if (atom.element === "C" && atom.charge === 0 && atom.isotope === 0) return null;
-  return atomLetters(atom, atom.element !== "C");
-}
-
-function frontBond(vertices: readonly Vertex[]): number {
-  const depth = (index: number) =>
-    vertices[index]!.at.depth + vertices[(index + 1) % vertices.length]!.at.depth;
-  let front = 0;
-  for (let index = 1; index < vertices.length; index++) if (depth(index) > depth(front) + 1e-6) front = index;
-  return front;
 }
