@@ -13,6 +13,8 @@ export interface RingCamera {
   /** Index, in the ring's list, of the atom at the right end. */
   readonly rightEnd: number;
   readonly azimuth: number;
+  /** Turn the drawing over, so that the down face of the leading ring points up; only for systems of several rings. */
+  readonly turnedOver: boolean;
   /** Height of the camera above the ring's mean plane. */
   readonly elevation: number;
 }

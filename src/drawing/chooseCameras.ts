@@ -35,23 +35,51 @@ export function chooseCameras(dossier: Dossier, hydrogens: boolean): readonly Ri
     let best: { readonly camera: RingCamera; readonly cost: number } | null = null;
     for (const lead of system.rings) {
       const ring = dossier.rings.find((each) => each.index === lead)!;
-      for (const azimuth of AZIMUTHS) {
+      for (const choice of AZIMUTHS.flatMap((azimuth) =>
+        several
+          ? [
+              { azimuth, turnedOver: false },
+              { azimuth, turnedOver: true },
+            ]
+          : [{ azimuth, turnedOver: false }],
+      )) {
+        const { azimuth } = choice;
         for (let rightEnd = 0; rightEnd < 6; rightEnd++) {
-          const camera: RingCamera = { lead, rightEnd, azimuth, elevation: ELEVATION };
+          const camera: RingCamera = { lead, rightEnd, ...choice, elevation: ELEVATION };
           const laid = judged.map((conformer) =>
             layChair(viewRings(dossier, conformer, system, camera, hydrogens)),
           );
           const cost =
-            laid.reduce((sum, each) => sum + each.cost + (several ? overlaps(each.view) : 0), 0) /
+            laid.reduce(
+              (sum, each) =>
+                sum + each.cost + (several ? overlaps(each.view) + systemCustomCost(each.view) : 0),
+              0,
+            ) /
               laid.length +
             AZIMUTH_COST * (azimuth - AZIMUTHS[0]!) +
-            customCost(dossier, ring, rightEnd);
+            (several ? 0 : customCost(dossier, ring, rightEnd));
           if (best === null || cost < best.cost - 1e-6) best = { camera, cost };
         }
       }
     }
     return best!.camera;
   });
+}
+
+/** The trade draws angular groups upwards, and the lowest locants of a long system to the left. */
+const ANGULAR_DOWN = 5;
+const FIRST_TO_THE_RIGHT = 10;
+
+function systemCustomCost(view: ChairView): number {
+  const shared = (vertex: number) => view.rings.filter((ring) => ring.includes(vertex)).length > 1;
+  const down = view.branches.filter(
+    ({ vertex, atom, orientation, end }) =>
+      atom !== null && orientation === "axial" && shared(vertex) && end.y > view.vertices[vertex]!.at.y,
+  ).length;
+  const middle = view.vertices.reduce((sum, { at }) => sum + at.x, 0) / view.vertices.length;
+  const first = view.vertices.find(({ locant }) => locant === "2");
+  const right = first !== undefined && first.at.x > middle ? FIRST_TO_THE_RIGHT : 0;
+  return ANGULAR_DOWN * down + right;
 }
 
 /** What a drawing of several rings suffers from bonds that cross, lie on each other, or are seen end on. */

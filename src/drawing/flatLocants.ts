@@ -71,13 +71,15 @@ function notesOf(dossier: Dossier, atoms: readonly FlatAtom[]): readonly Note[] 
     const centre = dossier.identity.stereocentres.find((each) => each.atom === atom);
     return centre === undefined || centre.descriptor === "unspecified" ? "" : `*${centre.descriptor}*`;
   };
-  const inRings = dossier.rings.flatMap((ring) =>
-    ring.atoms.map((atom, index) => ({
+  // An atom that rings share is numbered once, away from the middle of them all.
+  const inRings = [...new Set(dossier.rings.flatMap((ring) => ring.atoms))].map((atom) => {
+    const holders = dossier.rings.filter((ring) => ring.atoms.includes(atom));
+    return {
       atom,
-      markup: `${ring.locants[index] ?? ""}${descriptor(atom)}`,
-      centre: middle(ring.atoms.map((each) => atoms[each]!.at)),
-    })),
-  );
+      markup: `${holders[0]!.locants[holders[0]!.atoms.indexOf(atom)] ?? ""}${descriptor(atom)}`,
+      centre: middle(holders.flatMap((ring) => ring.atoms.map((each) => atoms[each]!.at))),
+    };
+  });
   const numbered = new Set(inRings.map((note) => note.atom));
   const others = dossier.identity.stereocentres
     .filter(({ atom }) => !numbered.has(atom) && descriptor(atom) !== "")

@@ -33,7 +33,7 @@ export function viewSystem(
     return found;
   };
   const lead = dossier.rings.find((ring) => ring.index === ringCamera.lead)!;
-  const frame = frameOf(lead.atoms.map(ringAtom));
+  const frame = frameOf(lead.atoms.map(ringAtom), ringCamera.turnedOver);
   const end = inFrame(frame, ringAtom(lead.atoms[ringCamera.rightEnd]!));
   const direction = (Math.atan2(end.y, end.x) * 180) / Math.PI;
   const camera: Camera = {
@@ -145,8 +145,8 @@ interface Frame {
   readonly z: Vector;
 }
 
-/** Axes of a ring: origin at its centre, z along its axis towards the face from which the list runs clockwise. */
-function frameOf(ring: readonly Vector[]): Frame {
+/** Axes of a ring: origin at its centre, z towards the face from which the list runs clockwise, or the other one. */
+function frameOf(ring: readonly Vector[], turnedOver: boolean): Frame {
   const origin = {
     x: ring.reduce((sum, { x }) => sum + x, 0) / ring.length,
     y: ring.reduce((sum, { y }) => sum + y, 0) / ring.length,
@@ -156,7 +156,8 @@ function frameOf(ring: readonly Vector[]): Frame {
   let axis: Vector = { x: 0, y: 0, z: 0 };
   from.forEach((point, i) => {
     const turn = cross(point, from[(i + 1) % from.length]!);
-    axis = { x: axis.x - turn.x, y: axis.y - turn.y, z: axis.z - turn.z };
+    const sign = turnedOver ? 1 : -1;
+    axis = { x: axis.x + sign * turn.x, y: axis.y + sign * turn.y, z: axis.z + sign * turn.z };
   });
   const z = unit(axis);
   const first = from[0]!;

@@ -5,7 +5,8 @@ import type { Substituent } from "../../structure/StructureAnalysis.ts";
 
 /**
  * A label for each conformer: locants with a or e, `ψ` before the letter next to a flat bond. The group stands in brackets
- * where two share a ring atom; a group that two rings share has a letter for each, `4a-a/e`. Bonds between
+ * where two share a ring atom; in a system of several rings the letter is
+ * set off, and a group that two rings share has a letter for each, `4a-a/e`. Bonds between
  * rings are named where groups alone do not tell the conformers apart, and where there are no groups.
  */
 export function conformerLabels(sets: readonly ChairSet[]): readonly string[] {
@@ -23,6 +24,8 @@ export function conformerLabels(sets: readonly ChairSet[]): readonly string[] {
 interface Entry {
   readonly locant: string;
   readonly group: string;
+  /** In a system of several rings the letter is set off, since locants may end in letters there. */
+  readonly apart: boolean;
   readonly letters: string[];
 }
 
@@ -35,6 +38,7 @@ function groupEntries(chairs: ChairSet): readonly string[] {
       const entry = entries.get(group.atom) ?? {
         locant: ring.names[ring.atoms.indexOf(group.ringAtom)]!,
         group: several ? `(${labelText(group.label)})` : "",
+        apart: ring.partners.length > 0,
         letters: [],
       };
       entry.letters.push(letterOf(chair, group));
@@ -46,10 +50,9 @@ function groupEntries(chairs: ChairSet): readonly string[] {
       (a, b) =>
         compareLocants(a.locant, b.locant) || (a.letters[0]! + a.group < b.letters[0]! + b.group ? -1 : 1),
     )
-    .map(({ locant, group, letters }) => {
-      const short = [...new Set(letters)].length === 1 ? letters[0]! : letters.join("/");
-      const joint = /[a-z]$/.test(locant) || short.length > 2 ? "-" : "";
-      return `${locant}${joint}${short}${group}`;
+    .map(({ locant, group, apart, letters }) => {
+      const short = new Set(letters).size === 1 ? letters[0]! : letters.join("/");
+      return `${locant}${apart ? "-" : ""}${short}${group}`;
     });
 }
 
