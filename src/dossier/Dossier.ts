@@ -254,6 +254,14 @@ export interface RelaxedGeometry {
     readonly z: number;
   }[];
   readonly puckering: readonly RingPuckering[];
+  /**
+   * Distinct staggered rotamers of the groups, lowest first: torsions asked for at the start, and energy of the force field
+   * above the lowest, kJ/mol. One with no torsions where nothing turns.
+   */
+  readonly rotamers: readonly {
+    readonly torsions: readonly { readonly atoms: readonly number[]; readonly degrees: number }[];
+    readonly energy_kJ_mol: number;
+  }[];
 }
 
 /** Shape of one ring in numbers (Cremer and Pople, J. Am. Chem. Soc. 1975, 97, 1354). */

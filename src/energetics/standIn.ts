@@ -50,3 +50,21 @@ export function borrowed(of: Parameter, id: string, extra: number, why: string):
     note: [why, of.note].filter((note) => note !== null).join(" "),
   };
 }
+
+/**
+ * An energy difference worked out by molecular mechanics.
+ * @param id - name under which all uses of it move together.
+ * @param value - kcal/mol.
+ * @param u - standard uncertainty, kcal/mol, above zero.
+ * @param method - the force field, printed as the medium: an isolated molecule.
+ * @param why - one sentence for the reader.
+ */
+export function computedParameter(
+  id: string,
+  value: number,
+  u: number,
+  method: string,
+  why: string,
+): Parameter {
+  return { ...standIn(id, value, u, why), basis: "computed", medium: `isolated molecule, ${method}` };
+}

@@ -135,7 +135,8 @@ describe("The 38 canonical forms and their symbols (source: Boeyens 1978; JCBN 1
     [125.3, 300, "E_2"],
     [50.8, 30, "^OH_1"],
     [50.8, 210, "^4H_3"],
-    [129.2, 90, "^5H_O"],
+    [129.2, 90, "^5H_4"],
+    [129.2, 150, "^5H_O"],
     [129.2, 330, "^3H_2"],
   ])("θ %s°, φ %s° is %s", (theta, phi, symbol) => {
     const { shape, distance } = nearestShape(theta, phi);

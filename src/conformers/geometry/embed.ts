@@ -19,12 +19,17 @@ export interface Embedded {
 /**
  * Three-dimensional coordinates of a conformer from its graph, senses and ring states alone, the same on every run.
  * @param cutOut - ring atoms of one system, for an ideal drawing of it; null for the whole molecule with hydrogens.
+ * @param rotamer - torsions about bonds to groups, where one rotamer is wanted.
  * @returns null when no start leads to coordinates that fulfil the senses and torsions.
  */
-export function embed(arrangement: Arrangement, cutOut: ReadonlySet<number> | null): Embedded | null {
+export function embed(
+  arrangement: Arrangement,
+  cutOut: ReadonlySet<number> | null,
+  rotamer: readonly TorsionTarget[] = [],
+): Embedded | null {
   const { molecule } = arrangement;
   const torsions = torsionTargets(arrangement, cutOut);
-  const { points, restraints } = moleculeRestraints(molecule, torsions, { cutOut });
+  const { points, restraints } = moleculeRestraints(molecule, [...torsions, ...rotamer], { cutOut });
   let best: { coordinates: Coordinates; penalty: number } | null = null;
   let good = 0;
   for (let seed = 1; seed <= STARTS; seed++) {

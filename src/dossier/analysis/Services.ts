@@ -1,3 +1,4 @@
+import type { Mechanics } from "../../conformers/mechanics/Mechanics.ts";
 import type { Register } from "../../register/Register.ts";
 import type { GroupIndex } from "../../structure/groupIndex.ts";
 import type { Toolkit } from "../../structure/Toolkit.ts";
@@ -7,5 +8,7 @@ export interface Services {
   readonly register: Register;
   readonly toolkit: Toolkit;
   readonly groups: GroupIndex;
+  /** Null where relaxed geometries and forms other than chairs are not wanted. */
+  readonly mechanics: Mechanics | null;
   readonly program: { readonly name: "ringfolio"; readonly version: string };
 }

@@ -100,6 +100,7 @@ export function analyseCompound(
       { molecule, body, rings: structure.rings },
       context,
       request.temperature_K,
+      services.mechanics,
     );
     if (answer === "too many") {
       refusal = {
@@ -119,7 +120,8 @@ export function analyseCompound(
     }
   }
   if (refusal !== null) alerts.push({ code: refusal.code, severity: "stop", message: refusal.message });
-  if (result !== null) alerts.push(...conformerAlerts(result, structure.rings, context));
+  if (result !== null)
+    alerts.push(...conformerAlerts(result, structure.rings, context, request.temperature_K));
 
   const undecided = structure.molecule === null && refusal === null;
   const members =
@@ -188,6 +190,7 @@ function membersOf(
       { molecule: member.molecule, body, rings },
       context,
       request.temperature_K,
+      null,
     );
     if (typeof result === "string") return [];
     const major = result.conformers[0]!;

@@ -5,14 +5,17 @@ import {
   enumerateConformers,
 } from "../../conformers/enumerateConformers.ts";
 import { idealGeometry } from "../../conformers/idealGeometry.ts";
+import type { Mechanics } from "../../conformers/mechanics/Mechanics.ts";
 import { relateConformers } from "../../conformers/relateConformers.ts";
+import { type RelaxedConformer, relaxConformer } from "../../conformers/relaxConformer.ts";
+import { twistConformers } from "../../conformers/twistConformers.ts";
 import { conformerTerms } from "../../energetics/conformerTerms.ts";
 import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import type { EnergyTerm } from "../../energetics/EnergyTerm.ts";
 import { equilibriumConstant } from "../../energetics/equilibriumConstant.ts";
 import { combine, type LinearEnergy, linearEnergy } from "../../energetics/LinearEnergy.ts";
 import { populations } from "../../energetics/populations.ts";
-import { standIn } from "../../energetics/standIn.ts";
+import { computedParameter, standIn } from "../../energetics/standIn.ts";
 import { kelvin, kilojoulePerMole, NORMAL_95 } from "../../quantity/units.ts";
 import type { Body } from "../../structure/Body.ts";
 import type { Molecule } from "../../structure/Molecule.ts";
@@ -27,7 +30,13 @@ import type {
   TemperatureRow,
 } from "../Dossier.ts";
 import { conformerLabels } from "./conformerLabels.ts";
+import { describeRelaxed } from "./describeRelaxed.ts";
+import { axialTertButyls, isStrained } from "./isStrained.ts";
 
+/** Standard uncertainty of an energy difference between two forms by mechanics, kcal/mol (judged). */
+const MECHANICS_DOUBT = 1.5;
+/** What MMFF94s charges an axial tert-butyl group beyond its published value, kcal/mol (6.2 against 4.8). */
+const TERT_BUTYL_EXCESS = 1.4;
 /** Doubt between conformers that differ and yet are charged alike, kcal/mol. */
 const RESIDUAL = 0.2;
 /** Doubt of each conformer of a system of several rings, whose strain single values do not show, kcal/mol. */
@@ -47,8 +56,9 @@ export interface ConformerResult {
     readonly basis: string;
     readonly standing: string | null;
   }[];
-  /** The chairs behind each conformer, in the same order. */
+  /** The ring states and the energy terms behind each conformer, in the same order. */
   readonly chairSets: readonly ChairSet[];
+  readonly terms: readonly (readonly EnergyTerm[])[];
 }
 
 /** A molecule with all senses that matter, the rings to analyse in it, and the part that is compared. */
@@ -60,6 +70,8 @@ export interface ConformerInput {
 
 interface Candidate {
   readonly arrangement: Arrangement;
+  /** Filled in where it is known before the others, as for twist-boats. */
+  readonly relaxed: RelaxedConformer | null;
   readonly chairs: ChairSet;
   readonly label: string;
   readonly terms: readonly EnergyTerm[];
@@ -75,19 +87,24 @@ export function analyseConformers(
   { molecule, body, rings }: ConformerInput,
   context: EnergyContext,
   temperature: number,
+  mechanics: Mechanics | null,
 ): ConformerResult | "too many" | "none" {
   const arrangements = enumerateConformers(molecule, rings);
   if (arrangements === null) return "too many";
-  if (arrangements.length === 0) return "none";
   const labels = conformerLabels(arrangements.map(({ chairs }) => chairs));
-  const candidates = distinguish(
+  const chairForms = distinguish(
     body,
     arrangements.map((arrangement, i) => {
       const { chairs } = arrangement;
       const terms = conformerTerms(chairs, context);
-      return { arrangement, chairs, label: labels[i]!, terms, energy: linearEnergy(terms) };
+      return { arrangement, relaxed: null, chairs, label: labels[i]!, terms, energy: linearEnergy(terms) };
     }),
   );
+  const candidates = [
+    ...chairForms,
+    ...twistForms({ molecule, body, rings }, chairForms, temperature, mechanics),
+  ];
+  if (candidates.length === 0) return "none";
   const T = kelvin(temperature);
   const base = candidates[0]!.energy;
   const relativeTo = (reference: LinearEnergy, energy: LinearEnergy) =>
@@ -121,7 +138,7 @@ export function analyseConformers(
       population95: shares[i]!.population95,
       contributions: candidate.terms.map((term) => contributionOf(term, temperature)),
       geometry: { atoms: idealGeometry(candidate.arrangement) },
-      relaxed: null,
+      relaxed: relaxedOf(candidate, mechanics),
       nitrogens: [],
     };
   });
@@ -129,6 +146,7 @@ export function analyseConformers(
   return {
     conformers,
     chairSets: ordered.map((candidate) => candidate.chairs),
+    terms: ordered.map((candidate) => candidate.terms),
     relation: relationOf(body, ordered),
     kinship: kinshipOf(body, ordered),
     equilibria: ordered.slice(1).map((candidate, i) => {
@@ -158,6 +176,66 @@ export function analyseConformers(
     })),
     deciding: decidingParameters(energies),
   };
+}
+
+function relaxedOf({ arrangement, relaxed }: Candidate, mechanics: Mechanics | null): Conformer["relaxed"] {
+  if (mechanics === null) return null;
+  const found = relaxed ?? relaxConformer(arrangement, mechanics);
+  return found === null ? null : describeRelaxed(arrangement, found);
+}
+
+/**
+ * Forms with a twist-boat, where mechanics is at hand and no chair is good: none at all, a tertiary group axial in the
+ * best, or more than 4 kcal/mol of contributions in it. Their energy is that of the best chair plus the difference by
+ * mechanics, with a wide doubt, since force fields are poor judges of single groups.
+ */
+function twistForms(
+  { molecule, body, rings }: ConformerInput,
+  chairForms: readonly Candidate[],
+  temperature: number,
+  mechanics: Mechanics | null,
+): readonly Candidate[] {
+  if (mechanics === null) return [];
+  const best = [...chairForms].sort(
+    (a, b) =>
+      combine([{ energy: a.energy, weight: 1 }], temperature).value -
+      combine([{ energy: b.energy, weight: 1 }], temperature).value,
+  )[0];
+  if (best !== undefined && !isStrained(best.chairs, best.terms, temperature)) return [];
+  const reference = best === undefined ? null : relaxConformer(best.arrangement, mechanics);
+  if (best !== undefined && reference === null) return [];
+  const twists = twistConformers(molecule, rings, body, mechanics);
+  const labels = conformerLabels(twists.map(({ arrangement }) => arrangement.chairs));
+  const base = reference?.energy_kJ_mol ?? twists[0]?.relaxed.energy_kJ_mol ?? 0;
+  const excess = best === undefined ? 0 : TERT_BUTYL_EXCESS * axialTertButyls(best.chairs);
+  return twists.map(({ arrangement, relaxed }, i): Candidate => {
+    const difference = (relaxed.energy_kJ_mol - base) / 4.184 + excess;
+    const why = `Energy of this form over ${best === undefined ? "the lowest one" : `the best chair, ${best.label}`} by ${mechanics.method}${excess > 0 ? `, with ${excess.toFixed(1)} kcal/mol added for what the force field overcharges axial tert-butyl` : ""}; ${MECHANICS_DOUBT} kcal/mol of doubt.`;
+    const own = computedParameter(
+      `mechanics/${relaxed.method}/${labels[i]!}`,
+      difference,
+      MECHANICS_DOUBT,
+      relaxed.method,
+      why,
+    );
+    const terms: EnergyTerm[] = [
+      ...(best?.terms ?? []).map((term) => ({ ...term, label: `${term.label} (in the best chair)` })),
+      {
+        kind: "non-chair form",
+        label: "this form over the best chair",
+        atoms: [],
+        parts: [{ parameter: own, coefficient: 1 }],
+      },
+    ];
+    return {
+      arrangement,
+      relaxed,
+      chairs: arrangement.chairs,
+      label: labels[i]!,
+      terms,
+      energy: linearEnergy(terms),
+    };
+  });
 }
 
 /** `A` … `Z`, then `AA`, `AB` … */
@@ -192,6 +270,7 @@ function contributionOf(term: EnergyTerm, temperature: number): Contribution {
   const { value, u } = combine([{ energy, weight: 1 }], temperature);
   const parameters = [...energy.values()].map(({ parameter }) => parameter);
   const missing = parameters.filter((parameter) => parameter.basis === "not available");
+  const computed = parameters.some((parameter) => parameter.basis === "computed");
   const keys = [...new Set(parameters.flatMap((parameter) => parameter.sources))].sort();
   const lead = term.parts[0]!.parameter;
   const standings = parameters.map((parameter) => parameter.standing);
@@ -204,9 +283,14 @@ function contributionOf(term: EnergyTerm, temperature: number): Contribution {
     atoms: term.atoms,
     value_kJ_mol: clean(value),
     u_kJ_mol: clean(u),
-    basis: missing.length > 0 ? "not available" : "published",
-    standing: missing.length > 0 ? null : weakest,
-    source: missing.length > 0 ? missing.map((parameter) => parameter.note).join(" ") : keys.join(", "),
+    basis: missing.length > 0 ? "not available" : computed ? "computed" : "published",
+    standing: missing.length > 0 || computed ? null : weakest,
+    source:
+      missing.length > 0
+        ? missing.map((parameter) => parameter.note).join(" ")
+        : computed
+          ? parameters.map((parameter) => parameter.note).join(" ")
+          : keys.join(", "),
     sourceKeys: keys,
     terms: term.parts.map(({ parameter, coefficient }) => ({
       row: parameter.id,
@@ -263,7 +347,7 @@ function kinshipOf(body: Body, ordered: readonly Candidate[]): Kinship {
  * the equality of a model is never printed as an equality of nature.
  */
 function distinguish(body: Body, candidates: readonly Candidate[]): readonly Candidate[] {
-  const rings = candidates[0]!.chairs.map(({ ring }) => ring);
+  const rings = (candidates[0]?.chairs ?? []).map(({ ring }) => ring);
   const severalRings = rings.some((ring) => ring.branches.length > 0);
   const bridged = rings.some((ring) => ring.partners.some(({ shared }) => shared.length > 2));
   const strain = bridged ? RING_SYSTEM.bridged : RING_SYSTEM.fused;

@@ -5,15 +5,14 @@ import { labelText } from "../../quantity/labelText.ts";
 import type { AnalysedRing, Substituent } from "../../structure/StructureAnalysis.ts";
 import type { Alert } from "../Dossier.ts";
 import type { ConformerResult } from "./analyseConformers.ts";
-
-/** Above this the most stable chair is strained enough for a twist-boat to compete, kJ/mol (4 kcal/mol). */
-const STRAIN_LIMIT = 16.7;
+import { axialTertiary, isStrained } from "./isStrained.ts";
 
 /** What a reader must know before trusting the populations, from the conformers and what they rest on. */
 export function conformerAlerts(
   result: ConformerResult,
   rings: readonly AnalysedRing[],
   context: EnergyContext,
+  temperature: number,
 ): readonly Alert[] {
   const alerts: Alert[] = [];
   const add = (severity: Alert["severity"], code: string, message: string) =>
@@ -65,36 +64,38 @@ export function conformerAlerts(
       "Each chair is chiral and the other is its mirror image; they interconvert, so the substance is not chiral on the time average and is no racemate of separable enantiomers unless inversion is slow.",
     );
   }
-  const best = result.chairSets[0]!;
-  const axialBulky = best
-    .filter(hasOrientations)
-    .flatMap((chair) =>
-      chair.ring.substituents.filter(
-        (group) =>
-          group.groupClass === "tertiary-alkyl" &&
-          orientationOf(chair, group) === "axial" &&
-          chair.ring.partners.every(({ atoms }) => !atoms.includes(group.ringAtom)),
-      ),
-    );
-  // What several rings share is held in place by all of them, and no strain that another form would lose.
-  const shared = new Set(
-    rings.flatMap((ring) =>
-      ring.partners.flatMap(({ atoms }) => ring.atoms.filter((atom) => atoms.includes(atom))),
-    ),
+  const chairsOnly = result.chairSets.findIndex((chairs) =>
+    chairs.every(({ form }) => form !== "twist-boat"),
   );
-  const strain = result.conformers[0]!.contributions.filter(
-    ({ atoms }) => atoms.length > 0 && atoms.every((atom) => !shared.has(atom)),
-  ).reduce((sum, { value_kJ_mol }) => sum + value_kJ_mol, 0);
-  if (axialBulky.length > 0 || strain > STRAIN_LIMIT) {
-    const reason =
-      axialBulky.length > 0
-        ? `${axialBulky.map((group) => labelText(group.label)).join(", ")} is axial in the best chair`
-        : "the best chair carries more than 4 kcal/mol of charged contacts";
+  const twists = result.conformers.filter(({ rings: forms }) =>
+    forms.some(({ form }) => form === "twist-boat"),
+  );
+  if (chairsOnly < 0) {
     add(
       "caution",
-      "non-chair-possible",
-      `A twist-boat may compete: ${reason}. Non-chair forms are not listed yet.`,
+      "non-chair-forms",
+      "No arrangement of chairs closes every ring; the forms listed have a twist-boat. They are built and compared by mechanics, without any published value, and the search may have missed some.",
     );
+  } else {
+    const best = result.chairSets[chairsOnly]!;
+    const bulky = axialTertiary(best);
+    const reason =
+      bulky.length > 0
+        ? `${bulky.map((group) => labelText(group.label)).join(", ")} is axial in the best chair`
+        : "the best chair carries more than 4 kcal/mol of charged contacts";
+    if (twists.length > 0) {
+      add(
+        "caution",
+        "non-chair-forms",
+        `Twist-boats are listed beside the chairs: ${reason}. Their energies rest on mechanics and are rough; axial and equatorial have no meaning on a twist-boat.`,
+      );
+    } else if (isStrained(best, result.terms[chairsOnly]!, temperature)) {
+      add(
+        "caution",
+        "non-chair-possible",
+        `A twist-boat may compete: ${reason}. Such forms are built only with mechanics, which did not run or found none.`,
+      );
+    }
   }
   const pairs = donorPairs(result.chairSets, context);
   if (pairs.length > 0) {

@@ -73,8 +73,21 @@ function branchEntries(chairs: ChairSet): readonly string[] {
 function formEntries(chairs: ChairSet): string {
   return chairs
     .filter((chair) => !hasOrientations(chair))
-    .map(({ ring, form }) => (chairs.length > 1 ? `ring ${ring.index + 1} ${form}` : form))
+    .map((chair) => {
+      const name = chair.form === "twist-boat" ? `twist-boat ${twistBonds(chair)}` : chair.form;
+      return chairs.length > 1 ? `ring ${chair.ring.index + 1} ${name}` : name;
+    })
     .join(", ");
+}
+
+/** Which of the six twist-boats: the two bonds with the largest torsions, and their sign. */
+function twistBonds({ ring, torsions }: Chair): string {
+  const largest = Math.max(...torsions.map(Math.abs));
+  const bonds = torsions.flatMap((torsion, k) =>
+    Math.abs(torsion) === largest ? [`${ring.names[k]}–${ring.names[(k + 1) % 6]}`] : [],
+  );
+  const sign = torsions.find((torsion) => Math.abs(torsion) === largest)! > 0 ? "+" : "−";
+  return `(${bonds.join(", ")}, ${sign})`;
 }
 
 function letterOf(chair: Chair, group: Substituent): string {
