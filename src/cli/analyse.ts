@@ -13,11 +13,16 @@ export const analyse: Command = {
     '"solvent": "CDCl3"} (the last two optional), and writes one JSON object a line, in order. A bad line is answered\n' +
     "with an error and does not stop the rest; the exit code is 0 all the same. It is the same analysis as the site's.\n" +
     '"ringfolio schema analyse-input" and "ringfolio schema analyse-output" print the JSON Schema of both sides.',
-  options: [],
-  run: async (_given, io) => {
+  options: [
+    {
+      name: "mechanics",
+      help: "also relax every conformer: adds xyz, and twist-boats where no chair is good",
+    },
+  ],
+  run: async ({ options }, io) => {
     const { loadServices } = await import("../site/loadServices.ts");
     const { analyseLine } = await import("../dossier/analyseLine.ts");
-    const services = await loadServices();
+    const services = await loadServices({ mechanics: options["mechanics"] !== undefined });
     const writeLine = lineWriter(io.output);
     for await (const line of splitLines(io.input, LONGEST_LINE)) {
       if (!(await writeLine(analyseLine(line, services)))) break;

@@ -2,6 +2,7 @@ import { nearestWord } from "../diagnostics/nearestWord.ts";
 import { findSolvent } from "../register/findSolvent.ts";
 import { analyseCompound } from "./analysis/analyseCompound.ts";
 import type { Services } from "./analysis/Services.ts";
+import { writeXyz } from "./writeXyz.ts";
 
 /** Temperatures the batch command takes, K: the same limits as in content files. */
 const LOWEST = 1;
@@ -103,27 +104,35 @@ function answer(id: unknown, fields: Record<string, unknown>, services: Services
       })),
       chirality: identity.chirality,
     },
-    rings: analysis.rings.map(({ atoms, parent, locants, configuration }) => ({
+    rings: analysis.rings.map(({ atoms, parent, system, kind, locants, configuration }) => ({
       atoms: atoms.map(written),
       parent,
+      system,
+      kind,
       locants,
       configuration,
     })),
     conformers: analysis.conformers.map((conformer) => ({
       id: conformer.id,
       label: conformer.label,
-      positions: conformer.positions.map(({ ring, ringAtom, substituent, orientation, face, locant }) => ({
-        ring,
+      forms: conformer.rings.map(({ form }) => form),
+      positions: conformer.positions.map(({ ringAtom, substituent, group: _group, ...position }) => ({
+        ...position,
         ringAtom: written(ringAtom),
         substituent: written(substituent),
-        orientation,
-        face,
-        locant,
       })),
       deltaG_kJ_mol: conformer.deltaG_kJ_mol,
       u_kJ_mol: conformer.u_kJ_mol,
       population: conformer.population,
       population95: conformer.population95,
+      ...(conformer.relaxed === null
+        ? {}
+        : {
+            xyz: writeXyz(
+              conformer.relaxed,
+              `${identity.canonicalSmiles} ${conformer.id} ${conformer.label}`,
+            ),
+          }),
       contributions: conformer.contributions.map((contribution) => ({
         kind: contribution.kind,
         label: contribution.label,
@@ -136,6 +145,10 @@ function answer(id: unknown, fields: Record<string, unknown>, services: Services
       })),
     })),
     relation: analysis.relation,
+    fusions: analysis.systems.flatMap(({ fusions }) =>
+      fusions.map(({ atoms, relation }) => ({ atoms: atoms.map(written), relation })),
+    ),
+    kinship: analysis.kinship,
     couplings: [],
     alerts: analysis.alerts,
   });

@@ -37,6 +37,13 @@ const success = z.strictObject({
     z.strictObject({
       atoms: z.array(atom).length(6).describe("Clockwise seen from the face called up"),
       parent: z.string(),
+      system: z
+        .int()
+        .min(0)
+        .describe("Rings with the same number share atoms, directly or through other rings"),
+      kind: z
+        .enum(["chair", "half-chair", "boat"])
+        .describe("What states it has: two chairs, two half-chairs, or a boat that a bridge forces"),
       locants: z.array(z.string()).length(6).describe("Of the atoms, in the same order"),
       configuration: z.array(
         z.strictObject({ locants: z.tuple([z.string(), z.string()]), relation: z.enum(["cis", "trans"]) }),
@@ -48,12 +55,17 @@ const success = z.strictObject({
       z.strictObject({
         id: z.string(),
         label: z.string().describe("Locants with a (axial) or e (equatorial)"),
+        forms: z
+          .array(z.enum(["chair", "half-chair", "boat", "twist-boat"]))
+          .describe("Of each ring, in the order of rings"),
         positions: z.array(
           z.strictObject({
             ring: z.int().min(0).describe("Index into rings"),
             ringAtom: atom,
             substituent: atom.describe("First atom of the group"),
+            kind: z.enum(["group", "ring bond"]).describe("A group, or a bond to an atom of another ring"),
             orientation: z.enum(["axial", "equatorial"]),
+            pseudo: z.boolean().describe("Next to a flat bond: pseudoaxial, pseudoequatorial"),
             face: z.enum(["up", "down"]),
             locant: z.string(),
           }),
@@ -62,6 +74,7 @@ const success = z.strictObject({
         u_kJ_mol: uncertainty,
         population: share,
         population95: z.tuple([share, share]).describe("95 % interval"),
+        xyz: z.string().optional().describe("Relaxed coordinates in Å as an XYZ file; only with mechanics"),
         contributions: z.array(
           z.strictObject({
             kind: z.enum([
@@ -71,6 +84,8 @@ const success = z.strictObject({
               "syn-axial",
               "geminal",
               "nitrogen substituent",
+              "ring fusion",
+              "non-chair form",
               "additivity allowance",
             ]),
             label: z.string(),
@@ -89,6 +104,20 @@ const success = z.strictObject({
     .enum(["identical", "enantiomeric", "diastereomeric"])
     .nullable()
     .describe("Of the two chairs of a single flexible ring"),
+  fusions: z
+    .array(z.strictObject({ atoms: z.tuple([atom, atom]), relation: z.enum(["cis", "trans"]) }))
+    .describe("Bonds that two rings share, and whether they are cis- or trans-fused"),
+  kinship: z.strictObject({
+    distinct: z.int().min(0).describe("Conformers when superimposable ones count once"),
+    distinctUpToMirror: z.int().min(0).describe("Conformers when mirror images count once too"),
+    pairs: z.array(
+      z.strictObject({
+        first: z.string(),
+        second: z.string(),
+        relation: z.enum(["identical", "enantiomeric"]),
+      }),
+    ),
+  }),
   couplings: z.array(
     z.strictObject({
       between: z.tuple([z.string(), z.string()]),

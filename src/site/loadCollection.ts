@@ -13,7 +13,7 @@ export async function loadCollection(
   folder: string,
   onProgress?: (done: number, total: number) => void,
 ): Promise<Collection> {
-  const services = await loadServices();
+  const services = await loadServices({ mechanics: true });
   const { files, attached, problems } = await readContentFolder(folder);
   const content = readContent(files, attached, services.register);
   const collection = buildCollection(content, services, onProgress);

@@ -42,7 +42,10 @@ describe("The command line", () => {
     { args: ["build", "--output", "--content", "x"], says: "The option --output needs a value." },
     { args: ["build", "--content="], says: "The option --content needs a value." },
     { args: ["build", "here"], says: 'build does not take "here".' },
-    { args: ["analyse", "--content", "x"], says: '"--content" is not an option of analyse; it has none.' },
+    {
+      args: ["analyse", "--content", "x"],
+      says: '"--content" is not an option of analyse; it has --mechanics.',
+    },
     { args: ["schema", "compuond"], says: 'Did you mean "compound"?' },
     { args: ["serve", "--port", "http"], says: '"http" is not a port' },
     { args: ["serve", "--port", "70000"], says: '"70000" is not a port' },

@@ -16,6 +16,7 @@ export async function services(): Promise<Services> {
       toolkit,
       register,
       groups: groupIndex(register, toolkit),
+      mechanics: null,
       program: { name: "ringfolio", version: "test" },
     };
   }

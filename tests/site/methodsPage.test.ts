@@ -47,7 +47,7 @@ const HELD: readonly (readonly [file: string, code: string, words: string])[] = 
   ["energetics/rules/additivityAllowance.ts", "ACROSS = 0.5;", "0.5 for each pair that is 1,4 and diaxial"],
   ["energetics/rules/additivityAllowance.ts", "BESIDE = 0.2;", "0.2 for each that is 1,3 and diequatorial"],
   ["dossier/analysis/analyseConformers.ts", "RESIDUAL = 0.2;", "with a doubt of 0.2 where symmetry"],
-  ["dossier/analysis/conformerAlerts.ts", "STRAIN_LIMIT = 16.7;", "more than 4 kcal/mol of contributions"],
+  ["dossier/analysis/isStrained.ts", "STRAIN_LIMIT = 16.7;", "more than 4 kcal/mol of contributions"],
 ];
 
 describe("The methods page", () => {

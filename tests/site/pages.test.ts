@@ -40,7 +40,7 @@ const FILES = [
 let made: ReadonlyMap<string, string>;
 
 beforeAll(async () => {
-  const services = await loadServices();
+  const services = await loadServices({ mechanics: false });
   const content = readContent(FILES, [], services.register);
   const collection = buildCollection(content, services);
   expect(collection.diagnostics.filter(({ severity }) => severity === "error")).toEqual([]);

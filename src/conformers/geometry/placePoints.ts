@@ -18,6 +18,7 @@ const SEPARATION_WEIGHT = 2;
  *
  * The minimiser is FIRE (Bitzek et al., Phys. Rev. Lett. 2006, 97, 170201; constants from memory). Nothing depends on clock or chance: the same
  * restraints and seed give the same points.
+ * @param seed - of the generator (dimensionless).
  * @returns coordinates in Å and what is left of the penalty (Å², dimension of a weighted square).
  */
 export function placePoints(

@@ -211,8 +211,9 @@ function twistForms(
   return twists.map(({ arrangement, relaxed }, i): Candidate => {
     const difference = (relaxed.energy_kJ_mol - base) / 4.184 + excess;
     const why = `Energy of this form over ${best === undefined ? "the lowest one" : `the best chair, ${best.label}`} by ${mechanics.method}${excess > 0 ? `, with ${excess.toFixed(1)} kcal/mol added for what the force field overcharges axial tert-butyl` : ""}; ${MECHANICS_DOUBT} kcal/mol of doubt.`;
+    // Forms equal by symmetry share one parameter, so that they move together.
     const own = computedParameter(
-      `mechanics/${relaxed.method}/${labels[i]!}`,
+      `mechanics/${relaxed.method}/${difference.toFixed(2)}`,
       difference,
       MECHANICS_DOUBT,
       relaxed.method,
