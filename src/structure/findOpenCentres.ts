@@ -1,5 +1,6 @@
 import { bridgesFit } from "./bridgesFit.ts";
-import { bondBetween, type Molecule, mirrorImage, type TetrahedralSense, withSenses } from "./Molecule.ts";
+import { couldHoldSense } from "./couldHoldSense.ts";
+import { type Molecule, mirrorImage, type TetrahedralSense, withSenses } from "./Molecule.ts";
 import type { Toolkit } from "./Toolkit.ts";
 
 /** Most open centres whose combinations are tried. */
@@ -28,7 +29,7 @@ export interface OpenStereo {
  */
 export function findOpenCentres(molecule: Molecule, toolkit: Toolkit): OpenStereo {
   const candidates = molecule.atoms
-    .filter((atom) => isCandidate(molecule, atom.index))
+    .filter((atom) => atom.stereo === null && couldHoldSense(molecule, atom.index))
     .map((atom) => atom.index);
   const member = (filled: Molecule): Member => ({
     molecule: filled,
@@ -68,50 +69,4 @@ export function findOpenCentres(molecule: Molecule, toolkit: Toolkit): OpenStere
 
 function differs(a: string | null, b: string | null): boolean {
   return a !== null && b !== null && a !== b;
-}
-
-/** True for an atom without a sense that could hold one: four different-looking places, or a stable pyramid. */
-function isCandidate(molecule: Molecule, index: number): boolean {
-  const atom = molecule.atoms[index]!;
-  if (atom.stereo !== null || atom.aromatic || atom.radicals > 0) return false;
-  const places = atom.neighbours.length + atom.hydrogens;
-  const orders = atom.neighbours.map((neighbour) => bondBetween(molecule, index, neighbour)!.order);
-  const single = orders.every((order) => order === 1);
-  switch (atom.element) {
-    case "C":
-    case "Si":
-    case "Ge":
-    case "Sn":
-      if (!single || places !== 4 || atom.hydrogens > 1) return false;
-      break;
-    case "N":
-      if (!single || places !== 4 || atom.hydrogens > 0) return false;
-      break;
-    case "P":
-    case "As":
-      if (!((places === 3 && single && atom.charge === 0) || places === 4) || atom.hydrogens > 0)
-        return false;
-      break;
-    case "S":
-    case "Se":
-      if (places !== 3 || atom.hydrogens > 0) return false;
-      break;
-    default:
-      return false;
-  }
-  return !hasEqualTerminalNeighbours(molecule, index);
-}
-
-/** Two equal one-atom neighbours (two methyls, two oxygens of a sulfone) settle the matter without a trial. */
-function hasEqualTerminalNeighbours(molecule: Molecule, index: number): boolean {
-  const seen = new Set<string>();
-  for (const neighbour of molecule.atoms[index]!.neighbours) {
-    const atom = molecule.atoms[neighbour]!;
-    if (atom.neighbours.length !== 1) continue;
-    const order = bondBetween(molecule, index, neighbour)!.order;
-    const key = `${atom.element}:${atom.isotope}:${atom.charge}:${atom.hydrogens}:${order}`;
-    if (seen.has(key)) return true;
-    seen.add(key);
-  }
-  return false;
 }
