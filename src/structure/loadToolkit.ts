@@ -47,7 +47,9 @@ async function start(): Promise<Toolkit> {
   if (log === null) throw new Error("the cheminformatics library offers no log");
 
   const use = <T>(molecule: Molecule, action: (mol: Mol) => T): T => {
-    const mol = library.get_mol(JSON.stringify(toJson(molecule)));
+    // The library's own assignment drops double-bond geometry that comes as a graph.
+    const assignStereo = molecule.bonds.every((bond) => bond.stereo === null);
+    const mol = library.get_mol(JSON.stringify(toJson(molecule)), JSON.stringify({ assignStereo }));
     if (mol === null) throw new Error(`the library refused its own graph: ${log.get_buffer()}`);
     try {
       return action(mol);
@@ -81,7 +83,20 @@ async function start(): Promise<Toolkit> {
     },
     inchi: (molecule) => use(molecule, (mol) => mol.get_inchi()),
     inchikey: (inchi) => (inchi === "" ? "" : library.get_inchikey_for_inchi(inchi)),
-    descriptors: (molecule) => use(molecule, readDescriptors),
+    descriptors: (molecule) =>
+      use(molecule, (mol) => {
+        if (molecule.bonds.every((bond) => bond.stereo === null)) return readDescriptors(mol);
+        // The library labels double bonds only in what it read from SMILES or a connection table, which has to be made
+        // before its labelling drops them from the graph.
+        const table = library.get_mol(mol.get_molblock());
+        const own = readDescriptors(mol);
+        if (table === null) return own;
+        try {
+          return { atoms: own.atoms, bonds: readDescriptors(table).bonds };
+        } finally {
+          table.delete();
+        }
+      }),
     depict: (molecule) => use(molecule, readDepiction),
   };
 }
