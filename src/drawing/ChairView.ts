@@ -1,9 +1,11 @@
 import type { Orientation } from "../dossier/Dossier.ts";
 import type { AtomLetters } from "./atomLetters.ts";
 import type { ProjectedPoint } from "./projectPoint.ts";
-import type { Point } from "./Scene.ts";
 
-/** One ring system of one conformer as the camera sees it, before labels are placed. Points in px, centre of the leading ring at the origin. */
+/**
+ * One ring system of one conformer as the camera sees it, before labels are placed: a single ring, or several that
+ * share atoms, drawn as one body. Points in px, the middle of the ring atoms at the origin.
+ */
 export interface ChairView {
   /** Conformer and leading ring, `A/0`; marks the items drawn from this view. */
   readonly group: string;
@@ -11,22 +13,28 @@ export interface ChairView {
   readonly bonds: readonly RingBond[];
   /** Every ring as indices in `vertices`, in ring order. */
   readonly rings: readonly (readonly number[])[];
+  /** Index in `rings` of the one whose axis is vertical. */
+  readonly lead: number;
   readonly branches: readonly Branch[];
 }
 
-/** A ring bond between two vertices, by their indices. */
+/** A ring bond between two vertices, given by their indices. */
 export interface RingBond {
   readonly from: number;
   readonly to: number;
-  readonly double: boolean;
+  readonly order: 1 | 2 | 3;
+  /** Side of the second line of a double bond: 1 to the right on the way from `from` to `to`, −1 to the left. */
+  readonly side: 1 | -1;
 }
 
+/** A ring atom. */
 export interface Vertex {
   readonly atom: number;
+  /** Empty where the atom has none. */
   readonly locant: string;
   readonly at: ProjectedPoint;
-  /** Middle of the rings it belongs to; its number stands on the other side. */
-  readonly centre: Point;
+  /** Direction on the screen that leads away from the rings, radians, clockwise from the right. */
+  readonly outward: number;
   /** Letters set at the vertex instead of a bare corner; null for carbon without charge or mass number. */
   readonly letters: AtomLetters | null;
 }
@@ -37,11 +45,11 @@ export interface Branch {
   readonly vertex: number;
   /** First atom of the group; null for a hydrogen. */
   readonly atom: number | null;
-  /** Null where two rings differ, or where the group is neither. */
+  readonly order: 1 | 2 | 3;
+  /** Gives the accent; null where the group is neither, or where two of its rings differ. */
   readonly orientation: Orientation | null;
-  /** Letters beside the bond: `a`, `ψe`, `a/e`; empty for none. */
+  /** What stands beside the bond: `a`, `ψe`, `a/e` where two rings differ, or nothing. */
   readonly cue: string;
-  readonly double: boolean;
   /** Where the attached atom stands. */
   readonly end: ProjectedPoint;
   readonly label: string;

@@ -37,7 +37,7 @@ export function branchChoices(vertex: Vertex, branch: Branch, group: string): re
       const to = { x: vertex.at.x + stretch * dx, y: vertex.at.y + stretch * dy };
       const text = setLabel(branch, side, sideways < STEEP, to, group, vertex.atom);
       const turn =
-        sideways < STEEP ? (side === Math.sign(vertex.at.x - vertex.centre.x || 1) ? 0 : 1) : outward ? 0 : 5;
+        sideways < STEEP ? (side === (Math.cos(vertex.outward) >= 0 ? 1 : -1) ? 0 : 1) : outward ? 0 : 5;
       return [
         {
           texts: [text],

@@ -6,6 +6,9 @@ import type { ProjectedPoint } from "./projectPoint.ts";
 import type { Point } from "./Scene.ts";
 import type { Stroke } from "./Stroke.ts";
 
+/** How much the inner line of a double bond is shortened at either end, as a share of its length. */
+const SHORTENED = 0.12;
+
 /**
  * The bonds of a chair as strokes of full length. The front edge of each ring is heavy, its neighbours taper from it,
  * the back is light; the bonds to groups are as light as the back and take the accent of their orientation.
@@ -26,13 +29,14 @@ export function chairStrokes({ view, branches }: LaidChair): readonly Stroke[] {
       atoms: [a.atom, b.atom],
       vertices: [bond.from, bond.to],
     };
-    if (!bond.double) return [single];
-    const inside = { x: (a.centre.x + b.centre.x) / 2, y: (a.centre.y + b.centre.y) / 2 };
-    const middle = { x: (a.at.x + b.at.x) / 2, y: (a.at.y + b.at.y) / 2 };
-    const across = normal(a.at, b.at);
-    const side = across.x * (inside.x - middle.x) + across.y * (inside.y - middle.y) < 0 ? -1 : 1;
-    const second = shifted(a.at, b.at, side * DOUBLE_GAP, 0.12);
-    return [single, { ...single, ...second, width: BACK_STROKE, endWidth: BACK_STROKE }];
+    const beside = (side: number): Stroke => ({
+      ...single,
+      ...shifted(a.at, b.at, side * DOUBLE_GAP, SHORTENED),
+      width: BACK_STROKE,
+      endWidth: BACK_STROKE,
+    });
+    if (bond.order === 1) return [single];
+    return bond.order === 2 ? [single, beside(bond.side)] : [single, beside(1), beside(-1)];
   });
   const bonds = view.branches.flatMap((branch, index): Stroke[] => {
     const vertex = vertices[branch.vertex]!;
@@ -52,8 +56,8 @@ export function chairStrokes({ view, branches }: LaidChair): readonly Stroke[] {
       atoms: isHydrogen ? [vertex.atom] : [vertex.atom, branch.atom!],
       vertices: [branch.vertex],
     };
-    if (!branch.double) return [single];
-    return [1, -1].map((side) => ({ ...single, ...shifted(vertex.at, to, (side * DOUBLE_GAP) / 2, 0) }));
+    const sides = branch.order === 1 ? [0] : branch.order === 2 ? [0.5, -0.5] : [1, 0, -1];
+    return sides.map((side) => ({ ...single, ...shifted(vertex.at, to, side * DOUBLE_GAP, 0) }));
   });
   return [...ring, ...bonds];
 }

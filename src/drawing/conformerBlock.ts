@@ -7,10 +7,11 @@ import { labelRuns } from "./labelRuns.ts";
 import { layChair } from "./layChair.ts";
 import { CAP_HEIGHT, LINE_HEIGHT, MAXIMUM_WIDTH, SMALL_SIZE, TEXT_SIZE } from "./measures.ts";
 import { moveItems } from "./moveItems.ts";
+import { placeSystem } from "./placeSystem.ts";
 import { placeText } from "./placeText.ts";
 import type { RingCamera } from "./RingCamera.ts";
 import type { Box, Part, SceneItem, SceneText, TextRun } from "./Scene.ts";
-import { viewRings } from "./viewRings.ts";
+import { viewSystem } from "./viewSystem.ts";
 import { wrapLabel } from "./wrapLabel.ts";
 
 /** A conformer ready to be set into a figure: chairs centred on the origin, words to be set beneath. */
@@ -38,7 +39,7 @@ export function conformerBlock(
   options: BlockOptions,
 ): ConformerBlock {
   const chairs = dossier.systems.map((system, index): RingDrawing => {
-    const view = viewRings(dossier, conformer, system, cameras[index]!, options.hydrogens);
+    const view = viewSystem(placeSystem(dossier, conformer, system, options.hydrogens), cameras[index]!);
     const first = Math.min(...system.rings) + 1;
     const last = Math.max(...system.rings) + 1;
     return {

@@ -56,12 +56,12 @@ export function vertexChoices(vertex: Vertex, group: string): readonly LabelChoi
   const stacked = ([1, -1] as const).map((down) => {
     // The H itself, not its subscript, stands under or over the element.
     const hydrogen = set(hydrogens, middle.x - width("H") / 2, middle.y + down * STACK, "start");
-    const outward = down === Math.sign(vertex.at.y - vertex.centre.y || 1);
+    const outward = down === (Math.sin(vertex.outward) >= 0 ? 1 : -1);
     return choice([withCharge, hydrogen], [...chargeBox, hydrogen.box], outward ? 2 : 4);
   });
   return [
-    choice([right], [{ ...right.box, left: core.right }], vertex.at.x >= vertex.centre.x ? 0 : 3),
-    choice([left], [{ ...left.box, right: core.left }, ...chargeBox], vertex.at.x < vertex.centre.x ? 0 : 3),
+    choice([right], [{ ...right.box, left: core.right }], Math.cos(vertex.outward) >= 0 ? 0 : 3),
+    choice([left], [{ ...left.box, right: core.left }, ...chargeBox], Math.cos(vertex.outward) < 0 ? 0 : 3),
     ...stacked,
   ];
 }
