@@ -46,6 +46,9 @@ export interface Dossier {
   readonly temperatures: readonly TemperatureRow[];
   /** When stereochemistry was left open and the author allowed it: what each member would give. */
   readonly members: readonly MemberSummary[];
+  /** Every stereoisomer of the constitution: this one, its enantiomer, the others; empty for a single one or too many. */
+  readonly stereoisomers: readonly StereoisomerSummary[];
+  readonly stereoisomerCount: StereoisomerCount;
   readonly alerts: readonly Alert[];
   /** One paragraph in plain sentences; changes with the data. */
   readonly conclusion: string;
@@ -374,6 +377,25 @@ export interface MemberSummary {
   readonly majorLabel: string;
   readonly population: number;
   readonly population95: readonly [number, number];
+}
+
+/** One stereoisomer of the constitution, with the locants of the compound. */
+export interface StereoisomerSummary {
+  readonly canonicalSmiles: string;
+  /** To the compound. Where it leaves configurations open, every stereoisomer it may stand for is `same`. */
+  readonly relation: "same" | "enantiomer" | "diastereomer";
+  /** CIP descriptors in the order of locants, then E/Z: `1R,3S`. */
+  readonly descriptors: string;
+  /** Relative configuration of its rings: `cis-1,3`, `r-1,c-2,t-4`, `trans-4a,8a`; empty where it has none. */
+  readonly configuration: string;
+  readonly chirality: Identity["chirality"];
+}
+
+export interface StereoisomerCount {
+  /** Stereoisomers of the constitution; null when there are too many elements to count. */
+  readonly distinct: number | null;
+  /** Upper bound: 2 to the power of the centres and double bonds. */
+  readonly upTo: number;
 }
 
 export type AlertSeverity = "stop" | "caution" | "note";

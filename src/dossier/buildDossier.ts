@@ -4,6 +4,7 @@ import { type Analysis, analyseCompound } from "./analysis/analyseCompound.ts";
 import type { Services } from "./analysis/Services.ts";
 import { writeConclusion } from "./analysis/writeConclusion.ts";
 import { canonicalJson } from "./canonicalJson.ts";
+import { checkClaim } from "./claim/checkClaim.ts";
 import type { CompoundInput } from "./content/CompoundInput.ts";
 import { DOSSIER_SCHEMA_VERSION, type Dossier, type SourceNote } from "./Dossier.ts";
 import { sha256 } from "./sha256.ts";
@@ -55,12 +56,23 @@ export function buildDossier(
       message: `${open.message} Write "stereoisomers: enumerate" to list every member.`,
     });
   }
-  diagnostics.push(...claimDiagnostics(input, analysis));
-  return { dossier: assemble(input, analysis, services), diagnostics };
+  const { equalNumberings, ...stereoisomers } = analysis.listStereoisomers();
+  diagnostics.push(...checkClaim(input, { ...analysis, equalNumberings }));
+  return { dossier: assemble(input, analysis, stereoisomers, services), diagnostics };
 }
 
-function assemble(input: CompoundInput, analysis: Analysis, services: Services): Dossier {
-  const { refusal: _refusal, writtenAtoms: _writtenAtoms, ...parts } = analysis;
+function assemble(
+  input: CompoundInput,
+  analysis: Analysis,
+  stereoisomers: Pick<Dossier, "stereoisomers" | "stereoisomerCount">,
+  services: Services,
+): Dossier {
+  const {
+    refusal: _refusal,
+    writtenAtoms: _writtenAtoms,
+    listStereoisomers: _listStereoisomers,
+    ...parts
+  } = analysis;
   const record: Dossier = {
     schemaVersion: DOSSIER_SCHEMA_VERSION,
     program: services.program,
@@ -73,6 +85,7 @@ function assemble(input: CompoundInput, analysis: Analysis, services: Services):
     name: input.name,
     prose: input.prose,
     ...parts,
+    ...stereoisomers,
     conclusion: writeConclusion({ name: input.name, ...parts }),
     claim: input.claim,
     evidence: input.evidence,
@@ -102,22 +115,4 @@ function refusalDiagnostic(
 ): Diagnostic {
   const place = position === null ? input.place(["structure"]) : input.place(["structure"], position);
   return { code, severity: "error", place, message: `${message} Found "${input.structure.smiles}".` };
-}
-
-/** A cis or trans claim that the structure contradicts is an error; elsewhere claims are recorded as written. */
-function claimDiagnostics(input: CompoundInput, analysis: Analysis): readonly Diagnostic[] {
-  const claimed = input.claim?.configuration;
-  if (claimed !== "cis" && claimed !== "trans") return [];
-  const pairs = analysis.rings.flatMap((ring) => ring.configuration);
-  const open = analysis.identity.stereocentres.some((centre) => centre.descriptor === "unspecified");
-  if (pairs.length !== 1 || open || pairs[0]!.relation === claimed) return [];
-  return [
-    {
-      code: "claim-contradicts-structure",
-      severity: "error",
-      place: input.place(["claim", "configuration"]),
-      message: `The claim says ${claimed}, but the groups at ${pairs[0]!.locants.join(" and ")} of the structure are ${pairs[0]!.relation}.`,
-      suggestion: pairs[0]!.relation,
-    },
-  ];
 }

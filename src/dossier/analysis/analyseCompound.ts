@@ -3,7 +3,6 @@ import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import type { MediumClass } from "../../register/Register.ts";
 import { analyseRings } from "../../structure/analyseRings.ts";
 import { describeBody } from "../../structure/describeBody.ts";
-import type { AnalysedRing } from "../../structure/StructureAnalysis.ts";
 import type {
   Alert,
   ChairRelation,
@@ -20,7 +19,9 @@ import type {
 } from "../Dossier.ts";
 import { analyseConformers, type ConformerResult } from "./analyseConformers.ts";
 import { conformerAlerts } from "./conformerAlerts.ts";
+import { describeCentres } from "./describeCentres.ts";
 import { configurationOf, describeRing } from "./describeRing.ts";
+import { describeStereoisomers, type StereoisomerResult } from "./describeStereoisomers.ts";
 import { describeSystems } from "./describeSystems.ts";
 import { readStructure } from "./readStructure.ts";
 import type { Services } from "./Services.ts";
@@ -52,6 +53,8 @@ export interface Analysis {
   readonly equilibria: readonly Equilibrium[];
   readonly temperatures: readonly TemperatureRow[];
   readonly members: readonly MemberSummary[];
+  /** Every stereoisomer of the constitution; takes a while for many centres, so only on request. */
+  readonly listStereoisomers: () => StereoisomerResult;
   readonly alerts: readonly Alert[];
   /** Set when the structure is understood and its conformers are not analysed. */
   readonly refusal: Refusal | null;
@@ -142,6 +145,7 @@ export function analyseCompound(
       equilibria: result?.equilibria ?? [],
       temperatures: result?.temperatures ?? [],
       members,
+      listStereoisomers: () => describeStereoisomers(structure.written, structure.rings, services.toolkit),
       alerts: alerts
         // Listing the members answers an open configuration; what is left is a caution.
         .map((alert) =>
@@ -210,25 +214,4 @@ function membersOf(
       },
     ];
   });
-}
-
-/** CIP descriptors with ring locants in their order (`1R`, `3S`), centres outside the rings after them by atom. */
-function describeCentres(
-  labels: ReadonlyMap<number, string>,
-  rings: readonly AnalysedRing[],
-): readonly string[] {
-  const inRings = [
-    ...new Set(
-      rings.flatMap((ring) =>
-        [1, 2, 3, 4, 5, 6].flatMap((locant) => {
-          const position = ring.locants.indexOf(locant);
-          const label = labels.get(ring.atoms[position]!);
-          return label === undefined ? [] : [`${ring.names[position]}${label}`];
-        }),
-      ),
-    ),
-  ];
-  const ringAtoms = new Set(rings.flatMap((ring) => ring.atoms));
-  const others = [...labels].filter(([atom]) => !ringAtoms.has(atom)).sort(([a], [b]) => a - b);
-  return [...inRings, ...others.map(([atom, label]) => `atom ${atom} ${label}`)];
 }
