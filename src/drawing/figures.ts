@@ -27,7 +27,7 @@ export const FIGURES: Readonly<Record<FigureName, Figure>> = {
     title: "One conformer",
     caption: (dossier, options = {}) => {
       const { id, label } = chosenConformer(dossier, options);
-      return `Conformer ${id}${label === "" ? "" : ` (${label})`} of ${nameMarkup(dossier.name)}. ${CUES}`;
+      return `Conformer ${id}${label === "" ? "" : ` (${label})`} of ${nameMarkup(dossier.name)}. ${cues(dossier)}`;
     },
     describe: (dossier, options = {}) => describeConformer(dossier, chosenConformer(dossier, options)),
     canShow: (dossier, options = {}) =>
@@ -72,7 +72,22 @@ function drawable(dossier: Dossier): boolean {
   );
 }
 
-const CUES = "The nearer ring edge is heavier; the letters a and e mark axial and equatorial bonds.";
+/** What the weight of lines and the letters beside bonds mean, as far as the dossier's drawings use them. */
+function cues({ conformers }: Dossier): string {
+  const groups = conformers.flatMap(({ positions }) => positions.filter(({ kind }) => kind === "group"));
+  const mixed = conformers.some(({ positions }) =>
+    positions.some(
+      (one) =>
+        one.kind === "group" &&
+        positions.some(
+          (other) => other.substituent === one.substituent && other.orientation !== one.orientation,
+        ),
+    ),
+  );
+  const both = mixed ? ", a/e a bond that is axial in one ring and equatorial in another" : "";
+  const pseudo = groups.some((position) => position.pseudo) ? ", ψ those beside a double bond" : "";
+  return `The nearer ring edge is heavier; the letters a and e mark axial and equatorial bonds${both}${pseudo}.`;
+}
 
 function captionOfEquilibrium(dossier: Dossier): string {
   const several = dossier.conformers.length > 1;
@@ -83,7 +98,7 @@ function captionOfEquilibrium(dossier: Dossier): string {
       : "";
   return (
     `${what} of ${nameMarkup(dossier.name)} (${medium(dossier)}) at ${formatTemperature(dossier.conditions.temperature_K)}, ` +
-    `with populations and 95\u00a0% intervals. ${CUES}${arrows}`
+    `with populations and 95\u00a0% intervals. ${cues(dossier)}${arrows}`
   );
 }
 

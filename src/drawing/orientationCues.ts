@@ -11,6 +11,8 @@ const ALONG = [0.55, 0.48, 0.62, 0.4, 0.7, 0.32];
 const BESIDE = [6.5, 8];
 /** Small letters have no ascender: their middle is at half the x-height. */
 const X_HEIGHT = 0.49;
+/** Width of one small letter, px. */
+const LETTER = 0.5 * SMALL_SIZE;
 
 /** The letter a or e beside the bond to each group, in the accent of its orientation: the cue that needs no colour. */
 export function orientationCues({ view, branches }: LaidChair, ground: Ground): readonly SceneText[] {
@@ -20,12 +22,15 @@ export function orientationCues({ view, branches }: LaidChair, ground: Ground): 
     const { from, to } = branches[index]!.bond!;
     const length = Math.hypot(to.x - from.x, to.y - from.y);
     const across = { x: -(to.y - from.y) / length, y: (to.x - from.x) / length };
-    const runs = labelRuns(branch.cue, { size: SMALL_SIZE, ink: branch.orientation ?? "muted" });
+    const runs = labelRuns(branch.cue, { size: SMALL_SIZE, ink: branch.orientation ?? "ink" });
+    // Several letters need more room beside a steep bond than one.
+    const last = runs.at(-1)!;
+    const wider = branch.cue.length > 1 ? (Math.abs(across.x) * (last.x + last.width - LETTER)) / 2 : 0;
     const places = ALONG.flatMap((along, order) =>
       BESIDE.flatMap((beside) =>
         [1, -1].map((side) => {
-          const x = from.x + along * (to.x - from.x) + side * beside * across.x;
-          const y = from.y + along * (to.y - from.y) + side * beside * across.y;
+          const x = from.x + along * (to.x - from.x) + side * (beside + wider) * across.x;
+          const y = from.y + along * (to.y - from.y) + side * (beside + wider) * across.y;
           const text = placeText(runs, {
             at: { x, y: y + (X_HEIGHT * SMALL_SIZE) / 2 },
             anchor: "middle",
