@@ -6,6 +6,7 @@ import { identityTable } from "./builders/identityTable.ts";
 import { membersTable } from "./builders/membersTable.ts";
 import { sourcesTable } from "./builders/sourcesTable.ts";
 import { stereocentresTable } from "./builders/stereocentresTable.ts";
+import { stereoisomersTable } from "./builders/stereoisomersTable.ts";
 import { temperatureTable } from "./builders/temperatureTable.ts";
 import type { TableModel } from "./TableModel.ts";
 
@@ -13,6 +14,7 @@ import type { TableModel } from "./TableModel.ts";
 export const TABLES: Readonly<Record<string, (dossier: Dossier) => TableModel>> = {
   identity: identityTable,
   stereocentres: stereocentresTable,
+  stereoisomers: stereoisomersTable,
   conformers: conformersTable,
   energies: energiesTable,
   temperature: temperatureTable,

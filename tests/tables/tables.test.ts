@@ -74,6 +74,7 @@ describe("The tables of a dossier", () => {
     expect(Object.keys(TABLES)).toEqual([
       "identity",
       "stereocentres",
+      "stereoisomers",
       "conformers",
       "energies",
       "temperature",

@@ -22,7 +22,7 @@ export type DirectiveKind = "figure" | "table" | "derivation" | "value";
 export const DIRECTIVES: Readonly<Record<PageKind, Readonly<Record<DirectiveKind, readonly string[]>>>> = {
   compound: {
     figure: ["equilibrium", "chair", "wedge", "temperature"],
-    table: ["energies", "temperature", "identity", "evidence", "sources"],
+    table: ["energies", "temperature", "identity", "stereoisomers", "evidence", "sources"],
     derivation: ["equilibrium"],
     value: [
       "name",
@@ -39,6 +39,7 @@ export const DIRECTIVES: Readonly<Record<PageKind, Readonly<Record<DirectiveKind
       "label.major",
       "label.minor",
       "relation",
+      "stereoisomers",
     ],
   },
   series: { figure: ["series"], table: ["comparison"], derivation: [], value: [] },

@@ -1,6 +1,7 @@
 import { type DossierView, dossierBody, type Section } from "../../../templates/dossier.ts";
 import type { Series } from "../../dossier/Collection.ts";
 import type { Dossier } from "../../dossier/Dossier.ts";
+import { stereoisomerSentences } from "../../dossier/stereoisomerSentences.ts";
 import type { FigureName } from "../../drawing/figures.ts";
 import { escapeHtml } from "../../quantity/escapeHtml.ts";
 import { labelHtml } from "../../quantity/labelHtml.ts";
@@ -14,6 +15,7 @@ import { renderProse } from "./renderProse.ts";
 /** The parts of every dossier in their order; `key` names what stands for a part that the prose places whole. */
 const STANDARD: readonly { readonly id: string; readonly title: string; readonly key?: string }[] = [
   { id: "identity", title: "Identity", key: "table/identity" },
+  { id: "stereoisomers", title: "Stereoisomers", key: "table/stereoisomers" },
   { id: "conformers", title: "Conformers" },
   { id: "energies", title: "Energies", key: "table/energies" },
   { id: "derivation", title: "From contributions to populations", key: "derivation/equilibrium" },
@@ -112,6 +114,11 @@ function sectionsOf(dossier: Dossier, parts: DossierParts): readonly Section[] {
       figure("wedge"),
       table("identity"),
       dossier.identity.stereocentres.length > 0 ? table("stereocentres") : null,
+    ],
+    stereoisomers: () => [
+      dossier.stereoisomers.length > 0
+        ? table("stereoisomers")
+        : once("table/stereoisomers", () => `<p>${stereoisomerSentences(dossier).join(" ")}</p>`),
     ],
     conformers: () => [analysed ? table("conformers") : null],
     energies: () => [analysed ? table("energies") : null],

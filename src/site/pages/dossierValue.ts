@@ -1,4 +1,5 @@
 import type { Conformer, Dossier } from "../../dossier/Dossier.ts";
+import { stereoisomerSentences } from "../../dossier/stereoisomerSentences.ts";
 import { formatEnergy } from "../../quantity/formatEnergy.ts";
 import { formatK } from "../../quantity/formatK.ts";
 import { formatPopulation } from "../../quantity/formatPopulation.ts";
@@ -43,6 +44,8 @@ export function dossierValue(dossier: Dossier, name: string): string {
       return minor?.label ?? missing;
     case "relation":
       return dossier.relation ?? "none";
+    case "stereoisomers":
+      return stereoisomerSentences(dossier)[0]!;
     default:
       throw new RangeError(`no value is called ${name}`);
   }
