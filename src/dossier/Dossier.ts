@@ -242,6 +242,7 @@ export interface NitrogenPlaces {
   readonly equatorial: number;
   readonly equatorial95: readonly [number, number];
   readonly source: string;
+  readonly sourceKeys: readonly string[];
 }
 
 /** One conformer of the whole molecule after relaxation. */

@@ -97,7 +97,7 @@ function assemble(
 
 function sourcesOf(analysis: Analysis, services: Services): readonly SourceNote[] {
   const keys = analysis.conformers.flatMap((conformer) =>
-    conformer.contributions.flatMap((c) => c.sourceKeys),
+    [...conformer.contributions, ...conformer.nitrogens].flatMap(({ sourceKeys }) => sourceKeys),
   );
   return [...new Set(keys)].sort().map((key) => {
     const citation = services.register.citations.find((entry) => entry.key === key);

@@ -82,7 +82,8 @@ export function parseRegister(
       ...(near === undefined ? {} : { suggestion: near }),
     });
   };
-  const groupKeys = groups.entries.map(({ entry }) => entry.key);
+  // Hydrogen is no group, but has places of its own on an inverting nitrogen.
+  const groupKeys = [...groups.entries.map(({ entry }) => entry.key), "H"];
   const classKeys = groupClasses.entries.map(({ entry }) => entry.key);
   const solventKeys = solvents.entries.map(({ entry }) => entry.key);
   const citationKeys = citations.entries.map(({ entry }) => entry.key);

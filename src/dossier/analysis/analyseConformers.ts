@@ -14,6 +14,7 @@ import type { EnergyContext } from "../../energetics/EnergyContext.ts";
 import type { EnergyTerm } from "../../energetics/EnergyTerm.ts";
 import { equilibriumConstant } from "../../energetics/equilibriumConstant.ts";
 import { combine, type LinearEnergy, linearEnergy } from "../../energetics/LinearEnergy.ts";
+import { nitrogenPlaces } from "../../energetics/nitrogenPlaces.ts";
 import { populations } from "../../energetics/populations.ts";
 import { computedParameter, standIn } from "../../energetics/standIn.ts";
 import { kelvin, kilojoulePerMole, NORMAL_95 } from "../../quantity/units.ts";
@@ -139,7 +140,18 @@ export function analyseConformers(
       contributions: candidate.terms.map((term) => contributionOf(term, temperature)),
       geometry: { atoms: idealGeometry(candidate.arrangement) },
       relaxed: relaxedOf(candidate, mechanics),
-      nitrogens: [],
+      nitrogens: candidate.chairs
+        .filter(({ form }) => form === "chair")
+        .flatMap(({ ring }) =>
+          ring.atoms
+            .filter((atom) => isSecondaryAmine(molecule, ring, atom))
+            .map((atom) => ({
+              ring: ring.index,
+              atom,
+              locant: ring.names[ring.atoms.indexOf(atom)]!,
+              ...nitrogenPlaces(context, ring, temperature),
+            })),
+        ),
     };
   });
   const grid = [...new Set([...TEMPERATURE_GRID, temperature])].sort((a, b) => a - b);
@@ -248,6 +260,13 @@ function conformerId(index: number): string {
 /** Sums of exact multiples leave noise in the sixteenth digit, which must not reach a record. */
 function clean(value: number): number {
   return Math.round(value * 1e9) / 1e9 + 0;
+}
+
+/** A ring N–H whose hydrogen has two places: pyramidal, uncharged. */
+function isSecondaryAmine(molecule: Molecule, ring: AnalysedRing, index: number): boolean {
+  const atom = molecule.atoms[index]!;
+  const flat = ring.flatAtoms.includes(ring.atoms.indexOf(index));
+  return atom.element === "N" && atom.charge === 0 && atom.hydrogens === 1 && !flat;
 }
 
 function positionsOf(chair: Chair): readonly Position[] {

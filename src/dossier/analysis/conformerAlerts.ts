@@ -112,11 +112,16 @@ export function conformerAlerts(
       "Polyhydroxylated oxane: single-group values are not meant for pyranoses in water; treat the populations as rough.",
     );
   }
-  if (rings.some((ring) => ring.ringKey.endsWith("/NH") || ring.ringKey.endsWith("/NH2+"))) {
+  const nitrogens = result.conformers[0]!.nitrogens;
+  if (nitrogens.length > 0) {
+    const shares = nitrogens.map(
+      ({ locant, equatorial, equatorial95: [low, high] }) =>
+        `N${locant} ${Math.round(100 * equatorial)} % (${Math.round(100 * low)} to ${Math.round(100 * high)} %)`,
+    );
     add(
       "note",
       "nh-places",
-      "The places of hydrogen on the ring nitrogen are not told apart; each conformer stands for both.",
+      `Each conformer holds both places of the hydrogen on the ring nitrogen; the share with it equatorial is ${shares.join(", ")}.`,
     );
   }
   return alerts;
