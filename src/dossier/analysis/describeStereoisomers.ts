@@ -19,7 +19,7 @@ export interface StereoisomerResult {
   readonly stereoisomerCount: StereoisomerCount;
   /**
    * The stereocentres of the compound under every numbering that the symmetry of its constitution makes as good as the
-   * printed one: (1S,2R) beside (1R,2S) for a meso compound. Empty where the compound is not one known stereoisomer.
+   * printed one, which comes first: (1S,2R) beside (1R,2S) for a meso compound. Empty where the compound is not one known stereoisomer.
    */
   readonly equalNumberings: readonly (readonly Stereocentre[])[];
 }
@@ -39,7 +39,7 @@ export function describeStereoisomers(
   const same = isomers.filter(({ relation }) => relation === "same");
   const equalNumberings =
     same.length === 1
-      ? same[0]!.arrangements.map((arrangement) => centresOf(arrangement, locants, toolkit))
+      ? [same[0]!.molecule, ...same[0]!.arrangements].map((made) => centresOf(made, locants, toolkit))
       : [];
   const listed = isomers.length > 1 && isomers.length <= MAXIMUM_LISTED ? isomers : [];
   return {
