@@ -10,8 +10,8 @@ import { describeCentres } from "./describeCentres.ts";
 import { configurationOf } from "./describeRing.ts";
 import { describeSystems } from "./describeSystems.ts";
 
-/** Most stereoisomers that are described one by one; more are counted only. */
-const MAXIMUM_LISTED = 64;
+/** Most stereoisomers that are described one by one, five centres' worth; more are counted only. */
+const MAXIMUM_LISTED = 32;
 
 export interface StereoisomerResult {
   /** Empty when there is one only, or too many. */
@@ -19,7 +19,8 @@ export interface StereoisomerResult {
   readonly stereoisomerCount: StereoisomerCount;
   /**
    * The stereocentres of the compound under every numbering that the symmetry of its constitution makes as good as the
-   * printed one, which comes first: (1S,2R) beside (1R,2S) for a meso compound. Empty where the compound is not one known stereoisomer.
+   * printed one, which comes first: (1S,2R) beside (1R,2S) for a meso compound. Empty where the compound is not one known
+   * stereoisomer.
    */
   readonly equalNumberings: readonly (readonly Stereocentre[])[];
 }

@@ -1,6 +1,7 @@
 import { type AuthorNumbering, analyseRings } from "../../structure/analyseRings.ts";
 import { chiralityOf } from "../../structure/chiralityOf.ts";
 import { describeBody } from "../../structure/describeBody.ts";
+import { findHiddenCentres } from "../../structure/findHiddenCentres.ts";
 import { findOpenCentres, type OpenStereo } from "../../structure/findOpenCentres.ts";
 import { findOpenDoubleBonds } from "../../structure/findOpenDoubleBonds.ts";
 import { type FoundRing, findRings } from "../../structure/findRings.ts";
@@ -52,16 +53,43 @@ export function readStructure(
       message: `E/Z geometry is not given for the double bond${openBonds.length > 1 ? "s" : ""} at atoms ${openBonds.map((pair) => pair.join("=")).join(", ")}.`,
     });
   }
+  const body = search.ok && chosen !== null ? describeBody(chosen, rings, toolkit) : null;
+  const hidden = body === null ? [] : findHiddenCentres(written, chosen!, body, toolkit);
+  const lost = hidden.find((centre) => !centre.givesMirrorImage);
+  if (hidden.length > 0 && lost === undefined) {
+    alerts.push({
+      code: "unmarked-chirality",
+      severity: "note",
+      message: `The substance is chiral at atom ${hidden[0]!.atom} (counted from 0 in the SMILES), for which a SMILES has no lasting mark; one of the two mirror images is shown, and their energies are equal.`,
+    });
+  }
   const refusal: Refusal | null = search.ok
     ? open.complete
-      ? null
+      ? lost === undefined
+        ? null
+        : {
+            code: "unsupported-unmarked-stereo",
+            message: `Atom ${lost.atom} (counted from 0 in the SMILES) has two configurations that are different substances, for which a SMILES has no lasting mark; the conformers are not analysed.`,
+            position: null,
+          }
       : {
           code: "unsupported-open-stereochemistry",
           message: `${open.centres.length} centres have no configuration; at most 8 are worked through.`,
           position: null,
         }
     : { ...search.refusal, position: null };
-  const identity = describeIdentity(smiles, written, shown, open, openBonds, rings, author, read, services);
+  const identity = describeIdentity(
+    smiles,
+    written,
+    shown,
+    open,
+    openBonds,
+    rings,
+    author,
+    read,
+    services,
+    hidden.length > 0,
+  );
   const result: StructureResult = {
     identity,
     structure: drawStructure(written, services),
@@ -70,7 +98,7 @@ export function readStructure(
     rings,
     found: search.ok ? search.rings : [],
     author,
-    body: refusal === null && chosen !== null ? describeBody(chosen, rings, toolkit) : null,
+    body: refusal === null ? body : null,
     refusal,
     molecule: refusal === null ? chosen : null,
     members: open.members,
@@ -140,6 +168,7 @@ function describeIdentity(
   author: AuthorNumbering,
   read: { readonly formula: string; readonly molarMass: number },
   services: Services,
+  chiralByShape: boolean,
 ): Identity {
   const { toolkit } = services;
   const labels = toolkit.descriptors(written);
@@ -176,7 +205,9 @@ function describeIdentity(
         descriptor: "unspecified" as const,
       })),
     ].sort((a, b) => a.atoms[0] - b.atoms[0] || a.atoms[1] - b.atoms[1]),
-    chirality: chiralityOf(shown, toolkit, new Set([...labels.atoms.keys(), ...open.centres])),
+    chirality: chiralByShape
+      ? "chiral"
+      : chiralityOf(shown, toolkit, new Set([...labels.atoms.keys(), ...open.centres])),
   };
 }
 
