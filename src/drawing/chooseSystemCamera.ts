@@ -19,10 +19,12 @@ const OTHER_SIDE = 2;
 /** Price of a leading ring that is no chair in every conformer, and of every ring that does not stand as it does. */
 const NO_CHAIR = 3;
 const TILTED = 2;
-/** Axes that differ by less than this cosine says stand alike. */
+/** Cosine of the angle up to which two axes stand alike. */
 const ALIKE = 0.97;
-/** Price of an angular group that hangs down, of a bridge below the ring it spans, and of a system that runs
- * into the depth or upwards rather than sideways, by the ratio of its extents. */
+/**
+ * Price of an angular group that hangs down, of a bridge below the ring it spans, and of a system that runs into the
+ * depth or upwards rather than sideways, by the ratio of its extents.
+ */
 const HANGING = 4;
 const BRIDGE_BELOW = 6;
 const DEEP = 8;
@@ -46,10 +48,16 @@ export function chooseSystemCamera(dossier: Dossier, system: RingSystem, hydroge
   const judged = dossier.conformers
     .slice(0, JUDGED)
     .map((conformer) => placeSystem(dossier, conformer, system, hydrogens));
-  const choices = cameras(system).map((camera) => {
-    const views = judged.map((body) => viewSystem(body, camera));
-    const seen = mean(views.map((view) => viewCost(view) + customCost(view) + stanceCost(view)));
-    return { camera, cost: seen + cameraCost(camera, judged), views };
+  const choices = cameras(system).flatMap((camera) => {
+    const upright = judged.map((body) => viewSystem(body, camera));
+    // Turned over, the drawing is the same one upside down: only what the trade is used to tells the two apart.
+    const seen = mean(upright.map((view) => viewCost(view) + stanceCost(view))) + cameraCost(camera, judged);
+    const over: RingCamera = { ...camera, above: "down" };
+    const turned = judged.map((body) => viewSystem(body, over));
+    return [
+      { camera, cost: seen + mean(upright.map(customCost)), views: upright },
+      { camera: over, cost: seen + mean(turned.map(customCost)), views: turned },
+    ];
   });
   const listed = best(choices, SHORT_LIST).map(({ camera, cost, views }) => ({
     camera,
@@ -69,11 +77,9 @@ function cameraCost({ lead, azimuth, elevation }: RingCamera, judged: readonly S
 
 function cameras(system: RingSystem): readonly RingCamera[] {
   return system.rings.flatMap((lead) =>
-    (["up", "down"] as const).flatMap((above) =>
-      [0, 1, 2, 3, 4, 5].flatMap((rightEnd) =>
-        AZIMUTHS.flatMap((azimuth) =>
-          ELEVATIONS.map((elevation) => ({ lead, above, rightEnd, azimuth, elevation })),
-        ),
+    [0, 1, 2, 3, 4, 5].flatMap((rightEnd) =>
+      AZIMUTHS.flatMap((azimuth) =>
+        ELEVATIONS.map((elevation): RingCamera => ({ lead, above: "up", rightEnd, azimuth, elevation })),
       ),
     ),
   );

@@ -91,6 +91,7 @@ function pairCost(a: Segment, b: Segment): number {
   const shared = a.vertices.find((vertex) => b.vertices.includes(vertex));
   if (shared !== undefined)
     return ACUTE * Math.max(0, (a.double || b.double ? NARROW_DOUBLE : NARROW) - angleAt(a, b, shared));
+  if (farApart(a, b)) return 0;
   const crossing = a.ring && b.ring ? CROSSING : GROUP_CROSSING;
   const gap = Math.min(
     pointSegmentGap(a.from, b.from, b.to),
@@ -99,6 +100,15 @@ function pairCost(a: Segment, b: Segment): number {
     pointSegmentGap(b.to, a.from, a.to),
   );
   return (meet(a, b) ? crossing : 0) + CLOSE * Math.max(0, APART - gap);
+}
+
+/** Whether two bonds are so far from each other across or down that neither can cost anything. */
+function farApart(a: Segment, b: Segment): boolean {
+  return (["x", "y"] as const).some(
+    (axis) =>
+      Math.min(a.from[axis], a.to[axis]) - Math.max(b.from[axis], b.to[axis]) > APART ||
+      Math.min(b.from[axis], b.to[axis]) - Math.max(a.from[axis], a.to[axis]) > APART,
+  );
 }
 
 /** Angle in degrees between two bonds at the vertex where they meet. */

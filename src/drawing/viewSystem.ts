@@ -22,6 +22,7 @@ export function viewSystem(body: SystemBody, camera: RingCamera): ChairView {
   const { frame, axis } = cameraFrame(
     body.rings[lead]!.map((vertex) => places[vertex]!),
     camera,
+    body.analysed[lead]!.isChair,
   );
   const origin = middleOf(places);
   const see = (point: Vector) => projectPoint(frame, combine([1, point], [-1, origin]));

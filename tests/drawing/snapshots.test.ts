@@ -3,6 +3,7 @@ import { renderFigure } from "../../src/drawing/renderFigure.ts";
 import { renderScene } from "../../src/drawing/renderScene.ts";
 import { seriesScene } from "../../src/drawing/seriesScene.ts";
 import { sampleDossier } from "./makeDossier.ts";
+import { systems } from "./systems.ts";
 import { variants } from "./variants.ts";
 
 /** Look at the picture before accepting a change. */
@@ -24,6 +25,17 @@ describe("Drawings kept for comparison", () => {
     ["two rings", "two-rings"],
   ])("%s", async (variant, name) => {
     await keep(renderFigure(variants[variant]!, "equilibrium").svg, name);
+  });
+
+  test.each([
+    ["trans-decalin groups", "trans-decalin"],
+    ["cis-decalin groups", "cis-decalin"],
+    ["steroid groups", "steroid"],
+    ["spiro", "spiro"],
+    ["adamantane", "adamantane"],
+    ["tetralin", "tetralin"],
+  ])("%s as one body", async (name, file) => {
+    await keep(renderFigure(systems[name]!, "equilibrium").svg, file);
   });
 
   test("a series", async () => {
