@@ -4,6 +4,7 @@ import { energiesTable } from "./builders/energiesTable.ts";
 import { evidenceTable } from "./builders/evidenceTable.ts";
 import { identityTable } from "./builders/identityTable.ts";
 import { membersTable } from "./builders/membersTable.ts";
+import { shapesTable } from "./builders/shapesTable.ts";
 import { sourcesTable } from "./builders/sourcesTable.ts";
 import { stereocentresTable } from "./builders/stereocentresTable.ts";
 import { stereoisomersTable } from "./builders/stereoisomersTable.ts";
@@ -16,6 +17,7 @@ export const TABLES: Readonly<Record<string, (dossier: Dossier) => TableModel>> 
   stereocentres: stereocentresTable,
   stereoisomers: stereoisomersTable,
   conformers: conformersTable,
+  shapes: shapesTable,
   energies: energiesTable,
   temperature: temperatureTable,
   members: membersTable,

@@ -11,14 +11,16 @@ import type { Substituent } from "../../structure/StructureAnalysis.ts";
  */
 export function conformerLabels(sets: readonly ChairSet[]): readonly string[] {
   const short = sets.map((chairs) => groupEntries(chairs).join(","));
-  const unclear = new Set(short).size < short.length || short.some((label) => label === "");
-  return sets.map((chairs, i) => {
-    const parts = unclear
-      ? [short[i]!, branchEntries(chairs).join(","), formEntries(chairs)]
-      : [short[i]!, formEntries(chairs)];
-    const label = parts.filter((part) => part !== "").join("; ");
-    return label === "" ? "unsubstituted" : label;
-  });
+  const join = (...parts: string[]) => parts.filter((part) => part !== "").join("; ") || "unsubstituted";
+  const plain = sets.map((chairs, i) => join(short[i]!, formEntries(chairs)));
+  const isClear = (labels: readonly string[]) =>
+    new Set(labels).size === labels.length && !labels.includes("unsubstituted");
+  if (isClear(plain)) return plain;
+  // Each bond between rings once; where even that leaves two alike, from both of its sides.
+  const labels = [false, true].map((all) =>
+    sets.map((chairs, i) => join(short[i]!, branchEntries(chairs, all).join(","), formEntries(chairs))),
+  );
+  return isClear(labels[0]!) ? labels[0]! : labels[1]!;
 }
 
 interface Entry {
@@ -56,12 +58,12 @@ function groupEntries(chairs: ChairSet): readonly string[] {
     });
 }
 
-/** Bonds between rings, each seen from the ring that comes first. */
-function branchEntries(chairs: ChairSet): readonly string[] {
+/** Bonds between rings, each seen from the ring that comes first, or `all` of them from every ring. */
+function branchEntries(chairs: ChairSet, all: boolean): readonly string[] {
   return chairs.filter(hasOrientations).flatMap((chair, index) => {
     const earlier = new Set(chairs.slice(0, index).flatMap(({ ring }) => ring.atoms));
     return chair.ring.branches
-      .filter((branch) => !earlier.has(branch.atom))
+      .filter((branch) => all || !earlier.has(branch.atom))
       .map((branch) => {
         const from = chair.ring.names[chair.ring.atoms.indexOf(branch.ringAtom)]!;
         return `${from}–${branch.label.replace(/^ring [A-Z][a-z]?/, "")} ${letterOf(chair, branch)}`;

@@ -22,7 +22,7 @@ export type DirectiveKind = "figure" | "table" | "derivation" | "value";
 export const DIRECTIVES: Readonly<Record<PageKind, Readonly<Record<DirectiveKind, readonly string[]>>>> = {
   compound: {
     figure: ["equilibrium", "chair", "wedge", "temperature"],
-    table: ["energies", "temperature", "identity", "stereoisomers", "evidence", "sources"],
+    table: ["energies", "shapes", "temperature", "identity", "stereoisomers", "evidence", "sources"],
     derivation: ["equilibrium"],
     value: [
       "name",

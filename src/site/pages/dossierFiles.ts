@@ -1,9 +1,11 @@
 import type { Dossier } from "../../dossier/Dossier.ts";
+import { writeXyz } from "../../dossier/writeXyz.ts";
 import { FIGURES, type FigureName } from "../../drawing/figures.ts";
 import { renderFigure } from "../../drawing/renderFigure.ts";
 import { TABLES } from "../../tables/TABLES.ts";
 import { tableCsv } from "../../tables/tableCsv.ts";
 import type { SitePage } from "./SitePage.ts";
+import { xyzFileName } from "./xyzFileName.ts";
 
 /** What a reader can take away from a dossier: the record, its figures and its tables. */
 export function dossierFiles(dossier: Dossier, folder: string): readonly SitePage[] {
@@ -20,6 +22,17 @@ export function dossierFiles(dossier: Dossier, folder: string): readonly SitePag
       path: `${folder}/tables/${name}.csv`,
       render: () => tableCsv(TABLES[name]!(dossier)),
     })),
+    ...dossier.conformers.flatMap(({ id, label, relaxed }) =>
+      relaxed === null
+        ? []
+        : [
+            {
+              path: `${folder}/${xyzFileName(dossier, id)}`,
+              render: () =>
+                writeXyz(relaxed, `${dossier.code} conformer ${id} (${label}); calculated, not measured`),
+            },
+          ],
+    ),
   ];
 }
 

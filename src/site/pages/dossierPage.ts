@@ -11,12 +11,14 @@ import { dossierValue } from "./dossierValue.ts";
 import { PagePlan } from "./PagePlan.ts";
 import type { RegisterPlaces } from "./registerPlaces.ts";
 import { renderProse } from "./renderProse.ts";
+import { xyzFileName } from "./xyzFileName.ts";
 
 /** The parts of every dossier in their order; `key` names what stands for a part that the prose places whole. */
 const STANDARD: readonly { readonly id: string; readonly title: string; readonly key?: string }[] = [
   { id: "identity", title: "Identity", key: "table/identity" },
   { id: "stereoisomers", title: "Stereoisomers", key: "table/stereoisomers" },
   { id: "conformers", title: "Conformers" },
+  { id: "shapes", title: "Ring shapes", key: "table/shapes" },
   { id: "energies", title: "Energies", key: "table/energies" },
   { id: "derivation", title: "From contributions to populations", key: "derivation/equilibrium" },
   { id: "temperature", title: "Population against temperature", key: "figure/temperature" },
@@ -109,6 +111,7 @@ function sectionsOf(dossier: Dossier, parts: DossierParts): readonly Section[] {
   const figure = (name: FigureName) => once(`figure/${name}`, () => parts.figure(name));
   const table = (name: string) => once(`table/${name}`, () => parts.table(name));
   const analysed = dossier.conformers.length > 0;
+  const relaxed = dossier.conformers.some((conformer) => conformer.relaxed !== null);
   const content: Record<string, () => readonly (string | null)[]> = {
     identity: () => [
       figure("wedge"),
@@ -121,6 +124,7 @@ function sectionsOf(dossier: Dossier, parts: DossierParts): readonly Section[] {
         : once("table/stereoisomers", () => `<p>${stereoisomerSentences(dossier).join(" ")}</p>`),
     ],
     conformers: () => [analysed ? table("conformers") : null],
+    shapes: () => [relaxed ? table("shapes") : null],
     energies: () => [analysed ? table("energies") : null],
     derivation: () => [analysed ? once("derivation/equilibrium", () => parts.derivation()) : null],
     temperature: () => (analysed ? [figure("temperature"), table("temperature")] : []),
@@ -189,5 +193,12 @@ function provenanceOf(dossier: Dossier): string {
 }
 
 function downloadsOf(dossier: Dossier): string {
-  return `<p><a href="${dossier.slug}.json" download>The whole record (JSON)</a>. Figures and tables have their own links above.</p>`;
+  const geometries = dossier.conformers
+    .filter(({ relaxed }) => relaxed !== null)
+    .map(({ id }) => `<a href="${xyzFileName(dossier, id)}" download>${id}</a>`);
+  const coordinates =
+    geometries.length === 0
+      ? ""
+      : ` Relaxed coordinates of the conformers (XYZ, Å): ${geometries.join(", ")}; minima of a force field for the isolated molecule, not measurements.`;
+  return `<p><a href="${dossier.slug}.json" download>The whole record (JSON)</a>. Figures and tables have their own links above.${coordinates}</p>`;
 }
