@@ -12,6 +12,8 @@ import { textWidth } from "./textWidth.ts";
 
 /** Lengths at which a bond may be drawn when its true end is crowded. */
 const STRETCHES = [1, 1.15, 1.3, 1.5, 1.75];
+/** A hydrogen, whose letter is small, may also stand nearer. */
+const HYDROGEN_STRETCHES = [...STRETCHES, 0.8];
 const STRETCH_COST = 14;
 /** Bonds with less sideways run than this share of their length are steep: their label may go to either side. */
 const STEEP = 0.35;
@@ -30,7 +32,7 @@ const STUB_COST = 1.2;
 export function branchChoices(vertex: Vertex, branch: Branch, group: string): readonly LabelChoice[] {
   const [dx, dy] = [branch.end.x - vertex.at.x, branch.end.y - vertex.at.y];
   const sideways = Math.abs(dx) / (Math.hypot(dx, dy) || 1);
-  return STRETCHES.flatMap((stretch) =>
+  return (branch.atom === null ? HYDROGEN_STRETCHES : STRETCHES).flatMap((stretch) =>
     ([1, -1] as const).flatMap((side): LabelChoice[] => {
       const outward = dx === 0 || Math.sign(dx) === side;
       if (!outward && sideways > SHALLOW) return [];
@@ -44,7 +46,7 @@ export function branchChoices(vertex: Vertex, branch: Branch, group: string): re
           boxes: [text.box],
           core: text.box,
           bond: { from: vertex.at, to },
-          cost: turn + STRETCH_COST * (stretch - 1) + stubCost(vertex, to, text),
+          cost: turn + STRETCH_COST * Math.abs(stretch - 1) + stubCost(vertex, to, text),
         },
       ];
     }),

@@ -29,7 +29,10 @@ const HANGING = 4;
 const BRIDGE_BELOW = 6;
 const DEEP = 8;
 const TALL = 4;
-/** Price, for every pair of rings, of rings or locants on the side where they are not looked for. */
+/**
+ * Price of rings or locants on the side where they are not looked for; for rings, times the cube of the number of rings
+ * after the first: the more rings, the more fixed is the picture that readers know.
+ */
 const WRONG_SIDE = 4;
 /** Rings this near to the middle, px, are on neither side. */
 const EVEN = 0.1 * BOND;
@@ -37,7 +40,7 @@ const EVEN = 0.1 * BOND;
 const JUDGED = 6;
 const LAID_OUT = 4;
 /** Cameras whose labels are laid out. */
-const SHORT_LIST = 6;
+const SHORT_LIST = 10;
 
 /**
  * The camera of a system of several rings. Each of its rings may lead, with either face above and any atom at the right
@@ -97,10 +100,15 @@ function customCost(view: ChairView): number {
   const middle = (vertices: readonly number[]) => mean(vertices.map((vertex) => view.vertices[vertex]!.at.x));
   const odd = view.rings.filter((ring) => ring.length !== 6).flat();
   const low = view.vertices.flatMap(({ locant }, index) => (/^[12]$/.test(locant) ? [index] : []));
-  const wrong = odd.length > 0 ? middle(odd) < -EVEN : low.length > 0 && middle(low) > EVEN;
+  const wrong =
+    odd.length > 0
+      ? (middle(odd) < -EVEN ? 1 : 0) * (view.rings.length - 1) ** 3
+      : low.length > 0 && middle(low) > EVEN
+        ? 1
+        : 0;
   return (
     (angular.length === 0 ? 0 : (HANGING * hanging) / angular.length) +
-    (wrong ? (WRONG_SIDE * view.rings.length * (view.rings.length - 1)) / 2 : 0) +
+    WRONG_SIDE * wrong +
     (hasBridgeBelow(view) ? BRIDGE_BELOW : 0)
   );
 }

@@ -23,6 +23,8 @@ const GROUP_CROSSING = 2.5;
 /** Free space wanted between the end of a bond and another bond, px, and the price of each px less. */
 const APART = 0.2 * BOND;
 const CLOSE = 1.2;
+/** The same from the middle of the letters at the end of a bond to a group. */
+const LETTER_APART = 0.33 * BOND;
 /** Bonds that meet should differ in direction by this angle, degrees, wider double ones by more; price of each less. */
 const NARROW = 20;
 const NARROW_DOUBLE = 38;
@@ -99,15 +101,21 @@ function pairCost(a: Segment, b: Segment): number {
     pointSegmentGap(b.from, a.from, a.to),
     pointSegmentGap(b.to, a.from, a.to),
   );
-  return (meet(a, b) ? crossing : 0) + CLOSE * Math.max(0, APART - gap);
+  return (meet(a, b) ? crossing : 0) + CLOSE * Math.max(0, APART - gap) + letterCost(a, b) + letterCost(b, a);
+}
+
+/** What the letters at the end of a bond to a group suffer from another bond. */
+function letterCost(group: Segment, other: Segment): number {
+  if (group.ring) return 0;
+  return CLOSE * Math.max(0, LETTER_APART - pointSegmentGap(group.to, other.from, other.to));
 }
 
 /** Whether two bonds are so far from each other across or down that neither can cost anything. */
 function farApart(a: Segment, b: Segment): boolean {
   return (["x", "y"] as const).some(
     (axis) =>
-      Math.min(a.from[axis], a.to[axis]) - Math.max(b.from[axis], b.to[axis]) > APART ||
-      Math.min(b.from[axis], b.to[axis]) - Math.max(a.from[axis], a.to[axis]) > APART,
+      Math.min(a.from[axis], a.to[axis]) - Math.max(b.from[axis], b.to[axis]) > LETTER_APART ||
+      Math.min(b.from[axis], b.to[axis]) - Math.max(a.from[axis], a.to[axis]) > LETTER_APART,
   );
 }
 

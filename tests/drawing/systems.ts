@@ -105,6 +105,7 @@ export const systems: Readonly<Record<string, Dossier>> = {
     name: "trans-syn-trans-perhydroanthracene",
     atoms: carbons(14),
     rings: [FIRST, SECOND, [7, 8, 10, 11, 12, 13]],
+    locants: ["9a", "1", "2", "3", "4", "4a", "10", "10a", "8a", "9", "8", "7", "6", "5"],
     places: [
       onLattice([
         { from: 0, steps: [1, 2, 3, 1, 2, 1, 2, 3, 1] },
@@ -112,8 +113,8 @@ export const systems: Readonly<Record<string, Dossier>> = {
       ]),
     ],
     fusions: [
-      { atoms: [0, 5], locants: ["1", "6"], relation: "trans" },
-      { atoms: [7, 8], locants: ["8", "9"], relation: "trans" },
+      { atoms: [0, 5], locants: ["9a", "4a"], relation: "trans" },
+      { atoms: [7, 8], locants: ["10a", "8a"], relation: "trans" },
     ],
   }),
   steroid: makeSystem(STEROID),
