@@ -50,7 +50,14 @@ function otherGroups(dossier: Dossier, conformer: Conformer, ring: Ring): readon
 function bondPlaces(conformer: Conformer, ring: Ring): readonly string[] {
   const bonds = positionsOf(conformer, ring, "ring bond");
   return [...new Set(bonds.map(orientationOf))].map((orientation) => {
-    const locants = bonds.filter((bond) => orientationOf(bond) === orientation).map(({ locant }) => locant);
+    const locants = bonds.filter((bond) => orientationOf(bond) === orientation).map(placeOf);
     return `ring bond${locants.length === 1 ? "" : "s"} ${orientation} at ${wordList(locants)}`;
   });
+
+  /** At a spiro atom, which has two such bonds, the other end is named too. */
+  function placeOf({ locant, ringAtom, substituent }: Position): string {
+    const several = bonds.filter((bond) => bond.ringAtom === ringAtom).length > 1;
+    const towards = ring.branches.find((branch) => branch.atom === substituent)?.towards ?? "";
+    return several && towards !== "" ? `${locant} (to ${towards})` : locant;
+  }
 }

@@ -16,7 +16,7 @@ export function systemSentences(dossier: Dossier): readonly string[] {
   return dossier.systems.flatMap((system) => {
     const rings = systemRings(dossier, system);
     const names = rings.map((ring, index) =>
-      index < system.rings.length ? `ring ${numberOf(dossier, ring)}` : partnerName(system, ring),
+      index < system.rings.length ? ownName(dossier, ring) : partnerName(system, ring),
     );
     const bridged = new Set<string>();
     const joints = rings.flatMap((ring, first) =>
@@ -37,8 +37,10 @@ export function systemSentences(dossier: Dossier): readonly string[] {
   });
 }
 
-function numberOf(dossier: Dossier, atoms: readonly number[]): number {
-  return dossier.rings.findIndex((ring) => ring.atoms === atoms) + 1;
+/** An analysed ring as the sentence about the conformer names it. */
+function ownName(dossier: Dossier, atoms: readonly number[]): string {
+  if (dossier.rings.length === 1) return "the ring";
+  return `ring ${dossier.rings.findIndex((ring) => ring.atoms === atoms) + 1}`;
 }
 
 /** A ring that is not analysed by its size, and by its aromatic bonds. */
