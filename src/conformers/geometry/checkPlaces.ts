@@ -4,6 +4,8 @@ import type { Coordinates } from "./placePoints.ts";
 
 /** Torsions smaller than this, in degrees, have no sign to keep. */
 const SIGNED = 12;
+/** Least volume of three unit vectors along bonds that still counts as tetrahedral; 0.77 is ideal. */
+const LEAST_VOLUME = 0.15;
 
 /**
  * Whether coordinates are what was asked for: every torsion within a tolerance and of the right sign, every tetrahedral
@@ -37,11 +39,15 @@ export function checkPlaces(
     );
     const list = [...atom.neighbours.map((neighbour) => place.get(neighbour)!), ...hydrogens];
     if (list.length < 3) return true;
-    const three = list.length === 4 ? list.slice(1) : list;
-    const [u, v, w] = three.map((j) => minus(at(j), at(i))) as [Vector, Vector, Vector];
-    const volume = dot(u, cross(v, w)) / (norm(u) * norm(v) * norm(w));
-    const sign = (atom.stereo === "cw") === (list.length === 4) ? 1 : -1;
-    return sign * volume > 0.15;
+    const bonds = list.map((j) => minus(at(j), at(i)));
+    const sense = atom.stereo === "cw" ? 1 : -1;
+    // A lone pair stands in fourth place, so that three neighbours run against the sense.
+    if (bonds.length === 3) return -sense * handedness(bonds[0]!, bonds[1]!, bonds[2]!) > LEAST_VOLUME;
+    // Each bond must stand on its own side of the other three: one triple alone lets the fourth bond fold through.
+    return bonds.every((_, left) => {
+      const [u, v, w] = bonds.filter((_bond, k) => k !== left) as [Vector, Vector, Vector];
+      return (left % 2 === 0 ? sense : -sense) * handedness(u, v, w) > LEAST_VOLUME;
+    });
   });
 }
 
@@ -54,6 +60,7 @@ const cross = (a: Vector, b: Vector): Vector => [
   a[0] * b[1] - a[1] * b[0],
 ];
 const norm = (a: Vector) => Math.hypot(...a);
+const handedness = (u: Vector, v: Vector, w: Vector) => dot(u, cross(v, w)) / (norm(u) * norm(v) * norm(w));
 
 function torsion(a: Vector, b: Vector, c: Vector, d: Vector): number {
   const [u, v, w] = [minus(b, a), minus(c, b), minus(d, c)];
