@@ -1,6 +1,7 @@
 import type { Molecule } from "../../structure/Molecule.ts";
 import type { Arrangement } from "../enumerateConformers.ts";
 import { checkPlaces } from "./checkPlaces.ts";
+import { facedMolecule } from "./facedMolecule.ts";
 import { moleculeRestraints, type RestrainedPoint, type TorsionTarget } from "./moleculeRestraints.ts";
 import { type Coordinates, placePoints } from "./placePoints.ts";
 
@@ -27,7 +28,7 @@ export function embed(
   cutOut: ReadonlySet<number> | null,
   rotamer: readonly TorsionTarget[] = [],
 ): Embedded | null {
-  const { molecule } = arrangement;
+  const molecule = facedMolecule(arrangement);
   const torsions = torsionTargets(arrangement, cutOut);
   const { points, restraints } = moleculeRestraints(molecule, [...torsions, ...rotamer], { cutOut });
   let best: { coordinates: Coordinates; penalty: number } | null = null;
