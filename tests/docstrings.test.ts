@@ -8,7 +8,7 @@ const NUMBER = /^(readonly\s+)?(number|Kelvin|KilojoulePerMole)(\[\])?$/;
 /** Positions in a list of atoms are not quantities; their names say what they are. */
 const INDEX = /(atom|atoms|index|locant|locants)$/i;
 const UNIT =
-  /\bkJ\/mol\b|\bkcal\/mol\b|\bK\b|\bÅ\b|\bHz\b|\bdegrees?\b|\bradians?\b|\bpixels?\b|\bdimensionless\b|\bfraction\b|\bper ?cent\b|\bindex\b|\batoms?\b|\blocants?\b|\bcount\b|\bnumber of\b|\bdecimals?\b|\bunit\b/;
+  /\bkJ\/mol\b|\bkcal\/mol\b|\bK\b|Å|\bHz\b|\bdegrees?\b|\bradians?\b|\bpixels?\b|\bdimensionless\b|\bfraction\b|\bper ?cent\b|\bindex\b|\batoms?\b|\blocants?\b|\bcount\b|\bnumber of\b|\bdecimals?\b|\bunit\b/;
 
 interface Declared {
   readonly where: string;

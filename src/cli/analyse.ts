@@ -22,7 +22,7 @@ export const analyse: Command = {
   run: async ({ options }, io) => {
     const { loadServices } = await import("../site/loadServices.ts");
     const { analyseLine } = await import("../dossier/analyseLine.ts");
-    const services = await loadServices({ mechanics: options["mechanics"] !== undefined });
+    const services = await loadServices({ mechanics: options["mechanics"] === "true" });
     const writeLine = lineWriter(io.output);
     for await (const line of splitLines(io.input, LONGEST_LINE)) {
       if (!(await writeLine(analyseLine(line, services)))) break;

@@ -69,9 +69,9 @@ export function puckering(ring: readonly Place[]): Puckering {
 /**
  * Heights of six atoms over their mean plane from puckering, Å: the way back.
  * z_j = √(1/3) q₂ cos(φ + 2α_j) + √(1/6) q₃ (−1)^(j−1)
- * @param q2 - amplitude of the boats, Å.
+ * @param q2 - amplitude of the boats, in Å.
  * @param phi - degrees.
- * @param q3 - amplitude of the chairs, signed, Å.
+ * @param q3 - amplitude of the chairs, signed, in Å.
  */
 export function heightsOf(q2: number, phi: number, q3: number): readonly number[] {
   return [0, 1, 2, 3, 4, 5].map(

@@ -1,7 +1,7 @@
 /** Configurational prefixes that are set in italics before a hyphen. */
 const PREFIXES = /\b(cis|trans|rel|rac|meso|tert|sec)(?=-)/g;
-/** Stereodescriptors in brackets, with their locants: `(1R,2S)`, `(1r,4r)`, `(2E)`. */
-const DESCRIPTORS = /\((?:\d*[′']*[RSrsEZ])(?:,\d*[′']*[RSrsEZ])*\)/g;
+/** Stereodescriptors in brackets, with their locants: `(1R,2S)`, `(4aS,8aS)`, `(1r,4r)`, `(2E)`. */
+const DESCRIPTORS = /\((?:\d*[a-z]?[′']*[RSrsEZ])(?:,\d*[a-z]?[′']*[RSrsEZ])*\)/g;
 /** Letter locants: `N-`, `O-`, `N,N-`. */
 const LETTERS = /(?<![A-Za-z])[NOSP](?:,[NOSP])*(?=-[A-Za-z])/g;
 

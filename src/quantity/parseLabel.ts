@@ -8,10 +8,11 @@ export interface Run {
 }
 
 /**
- * Digits after `_`, digits and a charge sign after `^`, and letters, digits or hyphens between two `*`.
+ * Digits after `_`, digits and a charge sign after `^`, and letters, digits or hyphens between two `*`. Symbols of ring
+ * shapes also raise and lower the ring oxygen and the comma between two locants: `^OS_2`, `^3^,^OB`.
  * Anything else, such as a lone `_` or `*`, is ordinary text: a label is never an error.
  */
-const MARK = /_(\d+)|\^(\d*[+\u2212-]|\d+)|\*([\p{L}\p{N}-]+)\*/gu;
+const MARK = /_(\d+|O(?![a-z])|,(?=_))|\^(\d*[+\u2212-]|\d+|O(?![a-z])|,(?=\^))|\*([\p{L}\p{N}-]+)\*/gu;
 
 /**
  * Splits the markup of a chemical label into runs: `CO_2Me`, `NH_3^+`, `*t*-Bu`.

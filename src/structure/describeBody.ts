@@ -7,15 +7,17 @@ import type { Toolkit } from "./Toolkit.ts";
 
 /** Finds the body that the analysed rings make, and describes what hangs on it. */
 export function describeBody(molecule: Molecule, rings: readonly AnalysedRing[], toolkit: Toolkit): Body {
-  const systems = findRingSystems(molecule).filter((system) =>
-    rings.some((ring) => ring.system === system.index),
-  );
+  const all = findRingSystems(molecule);
+  const systems = all.filter((system) => rings.some((ring) => ring.system === system.index));
   const inside = new Set(systems.flatMap((system) => system.atoms));
   for (const atom of pathsBetween(
     molecule,
     systems.map((system) => system.atoms),
   ))
     inside.add(atom);
+  // A ring that a path leads through belongs to the body whole, or what is left of it would be cut twice.
+  for (const system of all)
+    if (system.atoms.some((atom) => inside.has(atom))) for (const atom of system.atoms) inside.add(atom);
   const atoms = [...inside].sort((a, b) => a - b);
   const branches = atoms.flatMap((at) =>
     molecule.atoms[at]!.neighbours.filter((first) => !inside.has(first)).map((first): BodyBranch => {

@@ -38,7 +38,7 @@ export function extractFragment(molecule: Molecule, ringAtom: number, first: num
       from: place.get(bond.from)!,
       to: place.get(bond.to)!,
       stereo:
-        bond.stereo === null
+        bond.stereo === null || !bond.stereo.references.every((atom) => inside.has(atom))
           ? null
           : {
               ...bond.stereo,

@@ -1,7 +1,7 @@
 import { createRequire } from "node:module";
 import type { Log, MainModule, Mol } from "@rdkit/rdkit";
 import { ELEMENTS } from "./elements.ts";
-import type { Atom, Bond, Molecule } from "./Molecule.ts";
+import { type Atom, type Bond, type Molecule, type TetrahedralSense, withSenses } from "./Molecule.ts";
 import type { Depiction, Descriptors, ReadResult, Toolkit } from "./Toolkit.ts";
 
 /** Longest SMILES read, in characters; a longer string is a mistake or an attack. */
@@ -120,7 +120,7 @@ function read(library: MainModule, log: Log, smiles: string): ReadResult {
   if (mol === null) return { ok: false, ...explain(log.get_buffer(), smiles) };
   try {
     const json = JSON.parse(mol.get_json()) as { molecules: JsonMolecule[] };
-    const molecule = fromJson(json.molecules[0]!);
+    const molecule = withFirstPyramidsAsWritten(fromJson(json.molecules[0]!));
     if (molecule.atoms.length > MAXIMUM_ATOMS) {
       return { ok: false, reason: `More than ${MAXIMUM_ATOMS} atoms.`, position: null };
     }
@@ -143,6 +143,28 @@ function read(library: MainModule, log: Log, smiles: string): ReadResult {
   } finally {
     mol.delete();
   }
+}
+
+/**
+ * The sense of a three-coordinate atom that begins a SMILES or a part of it is given from its lone pair, as from a
+ * hydrogen (OpenSMILES, from memory); the library takes it from the first neighbour, which is the other sense.
+ */
+function withFirstPyramidsAsWritten(molecule: Molecule): Molecule {
+  const senses = new Map<number, TetrahedralSense>();
+  const seen = new Set<number>();
+  for (const { index } of molecule.atoms) {
+    if (seen.has(index)) continue;
+    const queue = [index];
+    for (let atom = queue.pop(); atom !== undefined; atom = queue.pop()) {
+      if (seen.has(atom)) continue;
+      seen.add(atom);
+      queue.push(...molecule.atoms[atom]!.neighbours);
+    }
+    const first = molecule.atoms[index]!;
+    if (first.stereo === null || first.hydrogens > 0 || first.neighbours.length !== 3) continue;
+    senses.set(index, first.stereo === "cw" ? "ccw" : "cw");
+  }
+  return senses.size === 0 ? molecule : withSenses(molecule, senses);
 }
 
 /**

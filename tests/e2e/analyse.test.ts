@@ -151,7 +151,7 @@ describe("ringfolio analyse, as a pipe", () => {
       { id: "a", smiles: "CC1CCCCC1" },
       "{ this is not JSON",
       { id: "c", smiles: "C1CC" },
-      { id: "d", smiles: "C1CCC2CCCCC2C1" },
+      { id: "d", smiles: "O=C1CCCCO1" },
       { id: "e", smiles: "FC1CCCCC1", temperature_K: -5 },
       { id: "f", smiles: "FC1CCCCC1", solvent: "treacle" },
       { id: "g", smiles: "FC1CCCCC1", temperature_K: 200, solvent: "CD2Cl2" },

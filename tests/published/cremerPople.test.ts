@@ -60,7 +60,8 @@ describe(`Puckering of published rings ${SOURCE}`, () => {
     expect(Math.abs(found.phi! - 183.7)).toBeLessThan(0.2);
     const q2 = 0.556 * Math.sin(5.2 * rad);
     const q3 = 0.556 * Math.cos(5.2 * rad);
-    heightsOf(q2, 183.7, q3).forEach((z, j) => expect(Math.abs(z - heights[j]!)).toBeLessThan(0.00006));
+    for (const [j, z] of heightsOf(q2, 183.7, q3).entries())
+      expect(Math.abs(z - heights[j]!)).toBeLessThan(0.00006);
     expect(nearestShape(found.theta, found.phi).shape.symbol).toBe("^4C_1");
   });
 
@@ -80,7 +81,7 @@ describe(`Puckering of published rings ${SOURCE}`, () => {
     expect(found.q2.toFixed(4)).toBe("0.5638");
     expect(found.q3.toFixed(4)).toBe("0.2052");
     const expected = [0.3788, -0.3504, 0.0554, 0.2113, -0.1829, -0.1121];
-    found.heights.forEach((z, j) => expect(z.toFixed(4)).toBe(expected[j]!.toFixed(4)));
+    for (const [j, z] of found.heights.entries()) expect(z.toFixed(4)).toBe(expected[j]!.toFixed(4));
   });
 });
 

@@ -38,6 +38,7 @@ describe("Shapes of pyranose rings", () => {
     ["β-D-glucopyranose", "OC[C@H]1O[C@@H](O)[C@H](O)[C@@H](O)[C@@H]1O", "eeeee", "^4C_1"],
     ["β-L-glucopyranose", "OC[C@@H]1O[C@H](O)[C@@H](O)[C@H](O)[C@H]1O", "eeeee", "^1C_4"],
     ["α-D-glucopyranose", "OC[C@H]1O[C@H](O)[C@H](O)[C@@H](O)[C@@H]1O", "aeeee", "^4C_1"],
+    ["β-D-fructopyranose", "OC[C@@]1(O)OC[C@@H](O)[C@@H](O)[C@@H]1O", "eaeea", "^2C_5"],
     ["α-L-rhamnopyranose", "C[C@@H]1O[C@@H](O)[C@H](O)[C@H](O)[C@H]1O", "aaeee", "^1C_4"],
   ])(
     "%s with its usual places is the chair that handbooks name (source: JCBN 1981, from memory)",

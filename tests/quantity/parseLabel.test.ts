@@ -1,5 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
+import { RING_SHAPES } from "../../src/conformers/ringShape.ts";
 import { parseLabel } from "../../src/quantity/parseLabel.ts";
 
 describe("parseLabel", () => {
@@ -30,8 +31,21 @@ describe("parseLabel", () => {
     ]);
   });
 
+  test("raises and lowers the ring oxygen and the commas of a ring shape's symbol", () => {
+    const set = (markup: string) => parseLabel(markup).map(({ text, style }) => `${style} ${text}`);
+    expect(set("^OS_2")).toEqual(["super O", "plain S", "sub 2"]);
+    expect(set("^3^,^OB")).toEqual(["super 3,O", "plain B"]);
+    expect(set("B_3_,_O")).toEqual(["plain B", "sub 3,O"]);
+    for (const { symbol } of RING_SHAPES) {
+      const runs = parseLabel(symbol);
+      expect(runs.filter(({ style }) => style === "plain").map(({ text }) => text)).toEqual([
+        symbol.replaceAll(/[\^_][O\d,]/g, ""),
+      ]);
+    }
+  });
+
   test("keeps a lone mark as ordinary text", () => {
-    for (const text of ["a_b", "5 * 3", "x^y", "_", "*", "^", "**"])
+    for (const text of ["a_b", "x_Os", "a_,b", "5 * 3", "x^y", "_", "*", "^", "**"])
       expect(parseLabel(text)).toEqual([{ text, style: "plain" }]);
     expect(parseLabel("")).toEqual([]);
   });

@@ -47,6 +47,17 @@ const HELD: readonly (readonly [file: string, code: string, words: string])[] = 
   ["energetics/rules/additivityAllowance.ts", "ACROSS = 0.5;", "0.5 for each pair that is 1,4 and diaxial"],
   ["energetics/rules/additivityAllowance.ts", "BESIDE = 0.2;", "0.2 for each that is 1,3 and diequatorial"],
   ["dossier/analysis/analyseConformers.ts", "RESIDUAL = 0.2;", "with a doubt of 0.2 where symmetry"],
+  [
+    "dossier/analysis/analyseConformers.ts",
+    "{ fused: 0.4, bridged: 1.0 }",
+    "0.4 kcal/mol of doubt, 1.0 where a bridge",
+  ],
+  ["dossier/analysis/analyseConformers.ts", "MECHANICS_DOUBT = 1.5;", "with 1.5 kcal/mol of doubt"],
+  [
+    "dossier/analysis/analyseConformers.ts",
+    "TERT_BUTYL_EXCESS = 1.4;",
+    "1.4 kcal/mol is added for each axial tert-butyl",
+  ],
   ["dossier/analysis/isStrained.ts", "STRAIN_LIMIT = 16.7;", "more than 4 kcal/mol of contributions"],
 ];
 

@@ -202,7 +202,7 @@ export function moleculeRestraints(
       }
     }
     const ring = ringsWith(i, j)[0];
-    if (ring === undefined && bond.stereo !== null) {
+    if (ring === undefined && bond.stereo?.references.every((atom) => place.has(atom))) {
       const ends = bond.stereo.references.map((atom) => place.get(atom)) as [number, number];
       const [first, last] = linked[i]!.includes(ends[0]) ? ends : [ends[1], ends[0]];
       const lengths = [lengthOf(first, i), lengthOf(i, j), lengthOf(j, last)] as const;

@@ -46,15 +46,34 @@ function describeShape(molecule: Molecule, ring: AnalysedRing, at: (atom: number
     Q_A: round(Q, 3),
     theta_deg: round(theta, 1),
     phi_deg: phi === null ? null : round(phi, 1),
-    symbol: sugar === null ? null : shape.symbol,
+    symbol: sugar === null ? null : sugarSymbol(molecule, ring, sugar[1]!, shape.symbol),
     nearest: shape.word,
     distance_deg: round(distance, 1),
   };
 }
 
 /**
- * Ring oxygen, then C1 to C5, where an oxane ring is a pyranose: just one of the two carbons beside the oxygen, the
- * anomeric one, carries another heteroatom (2-Carb-5; from memory).
+ * The symbol with the locants of the sugar. The anomeric carbon is C1 in an aldose and C2 in a ketose, where it
+ * carries one more carbon (2-Carb-2; from memory): β-D-fructopyranose is ^2C_5. Behind a longer chain its locant is not
+ * known from the ring alone, and there is no symbol. The choice of plane goes by order, so that the shift keeps it.
+ */
+function sugarSymbol(
+  molecule: Molecule,
+  ring: AnalysedRing,
+  anomeric: number,
+  symbol: string,
+): string | null {
+  const carbonsOf = (atom: number) =>
+    molecule.atoms[atom]!.neighbours.filter((n) => molecule.atoms[n]!.element === "C");
+  const chain = carbonsOf(anomeric).filter((n) => !ring.atoms.includes(n));
+  if (chain.length === 0) return symbol;
+  const single = chain.length === 1 && carbonsOf(chain[0]!).length === 1;
+  return single ? symbol.replaceAll(/[1-5]/g, (digit) => String(Number(digit) + 1)) : null;
+}
+
+/**
+ * Ring oxygen, then the five carbons from the anomeric one, where an oxane ring is a pyranose: just one of the two carbons
+ * beside the oxygen, the anomeric one, carries another heteroatom (2-Carb-5; from memory).
  */
 function sugarOrder(molecule: Molecule, ring: AnalysedRing): readonly number[] | null {
   if (ring.parent !== "oxane") return null;

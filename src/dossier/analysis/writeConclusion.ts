@@ -63,7 +63,11 @@ function equilibriumSentences(facts: ConclusionFacts): readonly string[] {
       `${conformers.length > 2 ? "The next conformer" : "The other chair"}, ${other.id} (${describe(other, facts.rings)}), lies ${formatEnergy(next.deltaG_kJ_mol, next.u_kJ_mol)} higher and holds ${share(other)}.`,
     );
   }
-  if (conformers.length > 2) sentences.push(`${conformers.length} chair conformers are listed.`);
+  if (conformers.length > 2) {
+    const chairs = conformers.filter(({ rings }) => rings.every(({ form }) => form === "chair")).length;
+    const kind = chairs === conformers.length ? "chair conformers" : "conformers";
+    sentences.push(`${conformers.length} ${kind} are listed.`);
+  }
   return sentences;
 }
 
@@ -75,6 +79,8 @@ function limitSentences(facts: ConclusionFacts): readonly string[] {
   if (gaps)
     sentences.push("The register lacks a value that decides the result; a wide stand-in takes its place.");
   if (nonChair) sentences.push("A twist-boat may compete with the chairs listed.");
+  if (facts.alerts.some((alert) => alert.code === "non-chair-forms"))
+    sentences.push("Twist-boats are among them; their energies rest on mechanics and are rough.");
   sentences.push(
     bySymmetry
       ? "The equality follows from symmetry and rests on no measured value."
@@ -91,17 +97,36 @@ function conditionsPhrase(conditions: Conditions): string {
     : `At ${temperature} in a medium like ${conditions.solventLabel} (none is stated),`;
 }
 
-/** Which groups are where, in words: `OH equatorial at C1, Me equatorial at C3`. */
+/** Which groups are where, in words: `OH equatorial at C1, Me equatorial at C3`; forms other than chairs by name. */
 function describe(conformer: Conformer, rings: readonly Ring[]): string {
-  if (conformer.positions.length === 0) return "no groups";
-  const orientations = new Set(conformer.positions.map((position) => position.orientation));
-  const places = conformer.positions.map(
-    (position) => `${position.group} at ${rings.length > 1 ? "position " : ""}${position.locant}`,
-  );
-  if (orientations.size === 1 && places.length > 1) {
-    return `${places.join(" and ")}, ${places.length > 2 ? "all" : "both"} ${[...orientations][0]}`;
+  const odd = conformer.rings.filter(({ form }) => form === "twist-boat" || form === "boat");
+  const forms = odd.map(({ ring, form }) => (rings.length > 1 ? `ring ${ring + 1} a ${form}` : `a ${form}`));
+  const groups = groupsInWords(conformer, rings);
+  const parts = [...forms, ...groups];
+  return parts.length > 0
+    ? parts.join(", ")
+    : conformer.label === "unsubstituted"
+      ? "no groups"
+      : "ring bonds as labelled";
+}
+
+function groupsInWords(conformer: Conformer, rings: readonly Ring[]): readonly string[] {
+  // An angular group has a place in each ring that holds it.
+  const byGroup = new Map<number, Conformer["positions"][number][]>();
+  for (const position of conformer.positions.filter(({ kind }) => kind === "group"))
+    byGroup.set(position.substituent, [...(byGroup.get(position.substituent) ?? []), position]);
+  const groups = [...byGroup.values()].map((places) => ({
+    ...places[0]!,
+    words: [
+      ...new Set(places.map(({ pseudo, orientation }) => `${pseudo ? "pseudo" : ""}${orientation}`)),
+    ].join("/"),
+  }));
+  const words = new Set(groups.map((group) => group.words));
+  if (words.size === 1 && groups.length > 1) {
+    const places = groups.map(
+      ({ group, locant }) => `${group} at ${rings.length > 1 ? "position " : ""}${locant}`,
+    );
+    return [`${places.join(" and ")}, ${places.length > 2 ? "all" : "both"} ${[...words][0]}`];
   }
-  return conformer.positions
-    .map((position) => `${position.group} ${position.orientation} at ${position.locant}`)
-    .join(", ");
+  return groups.map(({ group, words: where, locant }) => `${group} ${where} at ${locant}`);
 }

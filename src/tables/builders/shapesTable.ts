@@ -30,15 +30,15 @@ export function shapesTable(dossier: Dossier): TableModel {
       ...(several ? [{ key: "ring", title: "Ring", ...left }] : []),
       { key: "form", title: "Nearest form", ...left },
       { key: "symbol", title: "Symbol", ...left },
-      { key: "Q", title: "*Q* / Å", ...right, numbers: ["Q (Å)"] },
-      { key: "theta", title: "*θ* / °", ...right, numbers: ["theta (degrees)"] },
-      { key: "phi", title: "*φ* / °", ...right, numbers: ["phi (degrees)"] },
+      { key: "Q", title: "Q / Å", ...right, numbers: ["Q (Å)"] },
+      { key: "theta", title: "θ / °", ...right, numbers: ["theta (degrees)"] },
+      { key: "phi", title: "φ / °", ...right, numbers: ["phi (degrees)"] },
       { key: "torsions", title: "Torsions / °", ...left },
     ],
     rows,
     notes: [
       "Amplitude and angles by Cremer and Pople, in the order of locants given with the torsions; θ is 0° or 180° in a chair, 90° in a boat or twist-boat, and φ has no meaning near a chair.",
-      "A minimum of the force field for the isolated molecule, not a measured geometry; the symbol is given where a ring has sugar numbering.",
+      "A minimum of the force field for the isolated molecule, not a measured geometry; the symbol is given where a ring has sugar numbering, and numbers the atoms listed with the torsions as O, C1 to C5 in that order (C2 to C6 in a ketose).",
     ],
   };
 }
