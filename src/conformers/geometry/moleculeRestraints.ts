@@ -36,6 +36,8 @@ const TETRAHEDRAL_VOLUME = 0.7698;
 /** Least distances in Å between points four or more bonds apart: heavy atoms, one hydrogen, two. */
 const APART = [3.0, 2.5, 2.05];
 const APART_ONE_FOUR = [2.6, 2.3, 2.15];
+/** The same in a drawing: less than any distance on the lattice, so that only what would coincide there is pushed apart. */
+const APART_DRAWN = [2.45, 2.0, 1.5];
 
 /**
  * What the coordinates of a molecule must fulfil: bond lengths, angles, the given torsions with their signs, the senses
@@ -230,7 +232,8 @@ export function moleculeRestraints(
       if (bonds < 3 || (sameRings(i, j) && ringsWith(i, j).length > 0) || (bonds === 3 && sameRings(i, j)))
         continue;
       const hydrogens = Number(points[i]!.element === "H") + Number(points[j]!.element === "H");
-      separations.push({ i, j, least: (bonds === 3 ? APART_ONE_FOUR : APART)[hydrogens]! });
+      const apart = cutOut !== null ? APART_DRAWN : bonds === 3 ? APART_ONE_FOUR : APART;
+      separations.push({ i, j, least: apart[hydrogens]! });
     }
   }
   return { points, restraints: { points: points.length, distances, separations, volumes } };
