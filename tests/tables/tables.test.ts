@@ -76,6 +76,7 @@ describe("The tables of a dossier", () => {
       "stereocentres",
       "stereoisomers",
       "conformers",
+      "shapes",
       "energies",
       "temperature",
       "members",
