@@ -5,6 +5,7 @@ import type { RestrainedPoint, TorsionTarget } from "./geometry/moleculeRestrain
 import type { Coordinates } from "./geometry/placePoints.ts";
 import type { Mechanics } from "./mechanics/Mechanics.ts";
 import { rotamerTargets } from "./rotamerTargets.ts";
+import { torsionAngle } from "./torsionAngle.ts";
 
 /** Largest change of a ring torsion by relaxation, degrees, with its sign kept. */
 const TOLERANCE = 45;
@@ -18,7 +19,7 @@ export interface RelaxedConformer {
   readonly coordinates: Coordinates;
   /** Energy of the force field, kJ/mol; only differences between forms of one molecule mean anything. */
   readonly energy_kJ_mol: number;
-  /** Distinct rotamers found, lowest first: torsions asked for, and energy above the lowest, kJ/mol. */
+  /** Distinct rotamers found, lowest first: torsions in degrees, and energy above the lowest, kJ/mol. */
   readonly rotamers: readonly {
     readonly torsions: readonly TorsionTarget[];
     readonly energy_kJ_mol: number;
@@ -43,7 +44,17 @@ export function relaxConformer(arrangement: Arrangement, mechanics: Mechanics): 
     const settled = mechanics.relax(molecule, built.points, built.coordinates);
     if (settled === null) return null;
     if (!checkPlaces(molecule, built.points, settled.coordinates, built.torsions, TOLERANCE)) continue;
-    found.push({ points: built.points, torsions: rotamer, ...settled });
+    const at = (atom: number) => ({
+      x: settled.coordinates[3 * atom]!,
+      y: settled.coordinates[3 * atom + 1]!,
+      z: settled.coordinates[3 * atom + 2]!,
+    });
+    // What was asked for at the start may have turned; what is recorded is what was found.
+    const torsions = rotamer.map(({ atoms }) => ({
+      atoms,
+      degrees: Math.round(torsionAngle(at(atoms[0]), at(atoms[1]), at(atoms[2]), at(atoms[3])) * 10) / 10 + 0,
+    }));
+    found.push({ points: built.points, torsions, ...settled });
   }
   found.sort((a, b) => a.energy_kJ_mol - b.energy_kJ_mol);
   const [best] = found;

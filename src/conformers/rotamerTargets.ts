@@ -29,6 +29,11 @@ export function rotamerTargets(
       const before = ring.atoms[(position + 5) % 6]!;
       return [{ atoms: [before, group.ringAtom, group.atom, next[0]!] as const }];
     })
+    // A bond between two rings is met from both of them.
+    .filter(
+      ({ atoms: [, a, b] }, i, all) =>
+        all.findIndex(({ atoms: [, c, d] }) => (a === c && b === d) || (a === d && b === c)) === i,
+    )
     .slice(0, MOST_TURNED);
   return turning.reduce<readonly (readonly TorsionTarget[])[]>(
     (sets, { atoms }) => sets.flatMap((set) => STAGGERED.map((degrees) => [...set, { atoms, degrees }])),

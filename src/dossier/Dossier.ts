@@ -259,7 +259,7 @@ export interface RelaxedGeometry {
   }[];
   readonly puckering: readonly RingPuckering[];
   /**
-   * Distinct staggered rotamers of the groups, lowest first: torsions asked for at the start, and energy of the force field
+   * Distinct staggered rotamers of the groups, lowest first: torsions found, degrees, and energy of the force field
    * above the lowest, kJ/mol. One with no torsions where nothing turns.
    */
   readonly rotamers: readonly {
